@@ -1,0 +1,24 @@
+/** @type {import('jest').Config} */
+module.exports = {
+  testEnvironment: 'node',
+  testEnvironmentOptions: { customExportConditions: ['source', 'node', 'node-addons', 'require', 'default'] },
+  testMatch: ['<rootDir>/{src,test}/**/*.{spec,e2e-spec}.ts'],
+  // Migrations, argon2 and spawned readers make a first request slower than jest's five seconds on a busy machine.
+  testTimeout: 60000,
+  maxWorkers: 2,
+  transform: {
+    '^.+\\.ts$': [
+      '@swc/jest',
+      {
+        jsc: {
+          target: 'es2022',
+          parser: { syntax: 'typescript', decorators: true },
+          transform: { legacyDecorator: true, decoratorMetadata: true, useDefineForClassFields: false },
+          keepClassNames: true,
+        },
+        module: { type: 'commonjs' },
+        sourceMaps: 'inline',
+      },
+    ],
+  },
+};

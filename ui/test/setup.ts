@@ -1,0 +1,12 @@
+import '@testing-library/jest-dom/vitest';
+import { configure } from '@testing-library/dom';
+
+class ResizeObserverStub {
+  observe() {}
+  unobserve() {}
+  disconnect() {}
+}
+globalThis.ResizeObserver ??= ResizeObserverStub as unknown as typeof ResizeObserver;
+
+// Fluent's focus handling at times marks an open dialog aria-hidden in jsdom; real visibility is checked in the browser.
+configure({ defaultHidden: true, asyncUtilTimeout: 5000 });

@@ -14,7 +14,12 @@ export default tseslint.config(
     extends: [tseslint.configs.recommendedTypeChecked],
     languageOptions: {
       parserOptions: {
-        project: ['common/tsconfig.json', 'reference/tsconfig.json', 'service/tsconfig.test.json', 'ui/tsconfig.json'],
+        project: [
+          'common/tsconfig.json',
+          'reference/tsconfig.json',
+          'service/tsconfig.test.json',
+          'ui/tsconfig.json',
+        ],
         tsconfigRootDir: root,
       },
     },

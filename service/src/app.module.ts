@@ -1,0 +1,24 @@
+import { type DynamicModule, Module } from '@nestjs/common';
+import { APP_INTERCEPTOR, APP_PIPE } from '@nestjs/core';
+import { ScheduleModule } from '@nestjs/schedule';
+import { ConfigModule } from './config/config.module';
+import type { Settings } from './config/settings';
+import { DatabaseModule } from './database/database.module';
+import { HealthModule } from './health/health.module';
+import { BodyInterceptor } from './http/json-body';
+import { ValidationPipe } from './http/validation.pipe';
+
+/** Each feature adds one line here. */
+@Module({})
+export class AppModule {
+  static forRoot(settings: Settings): DynamicModule {
+    return {
+      module: AppModule,
+      imports: [ConfigModule.forRoot(settings), DatabaseModule, ScheduleModule.forRoot(), HealthModule],
+      providers: [
+        { provide: APP_INTERCEPTOR, useClass: BodyInterceptor },
+        { provide: APP_PIPE, useClass: ValidationPipe },
+      ],
+    };
+  }
+}

@@ -1,0 +1,81 @@
+import type { BrandVariants } from '@fluentui/react-components';
+
+/** The slate ramp from which Fluent derives its brand colours. */
+export const slate: BrandVariants = {
+  10: '#060B10',
+  20: '#0D1720',
+  30: '#13212D',
+  40: '#192B3A',
+  50: '#1E3343',
+  60: '#22384A',
+  70: '#2A465C',
+  80: '#335570',
+  90: '#426883',
+  100: '#547C98',
+  110: '#6A90AA',
+  120: '#83A4BB',
+  130: '#9DB8CB',
+  140: '#B8CDDA',
+  150: '#D4E1E9',
+  160: '#EEF4F6',
+};
+
+export type ColourMode = 'light' | 'dark';
+
+/** Our own colours. FluentProvider writes each key as a CSS variable of the same name. */
+export const colours = {
+  light: {
+    slPaper: '#FBFAF7',
+    slSheet: '#FFFFFF',
+    slSunk: '#F3F1EA',
+    slBed: '#EAE7DD',
+    slRule: '#DEDAD0',
+    slRule2: '#C5C0B3',
+    slInk: '#17212B',
+    slInk2: '#3B4854',
+    slInk3: '#586571',
+    slSlate: '#22384A',
+    slAccent: '#2F5D82',
+    slLoess: '#B27A2B',
+    slLoessText: '#845411',
+    slLoessTint: '#F7EDD9',
+    slRust: '#9A3F23',
+    slRustText: '#8E3519',
+    slRustTint: '#F8E6DE',
+    slMoss: '#4C6B3C',
+    slMossText: '#40602F',
+    slMossTint: '#E8EFE1',
+    slIce: '#EEF4F6',
+    slIceTint: '#E3EDF1',
+    slSelect: '#E1ECF1',
+    slLine: '#22384A',
+  },
+  dark: {
+    slPaper: '#121A21',
+    slSheet: '#18222B',
+    slSunk: '#0D141A',
+    slBed: '#0A1015',
+    slRule: '#27343F',
+    slRule2: '#3A4A57',
+    slInk: '#E8EDEF',
+    slInk2: '#C2CCD3',
+    slInk3: '#98A6B0',
+    slSlate: '#B8CDDA',
+    slAccent: '#8FBCE0',
+    slLoess: '#D9A75A',
+    slLoessText: '#E3B971',
+    slLoessTint: '#2C2518',
+    slRust: '#D9775A',
+    slRustText: '#EE9B80',
+    slRustTint: '#34201A',
+    slMoss: '#8DB17A',
+    slMossText: '#A4C692',
+    slMossTint: '#1E2A1A',
+    slIce: '#1B2A34',
+    slIceTint: '#1C2C37',
+    slSelect: '#213441',
+    slLine: '#B8CDDA',
+  },
+} as const satisfies Record<ColourMode, Record<string, string>>;
+
+export type ColourName = keyof (typeof colours)['light'];

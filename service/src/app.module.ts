@@ -7,6 +7,8 @@ import { DatabaseModule } from './database/database.module';
 import { HealthModule } from './health/health.module';
 import { BodyInterceptor } from './http/json-body';
 import { ValidationPipe } from './http/validation.pipe';
+import { LedgerModule } from './ledger/ledger.module';
+import { VersionsModule } from './versions/versions.module';
 
 /** Each feature adds one line here. */
 @Module({})
@@ -14,7 +16,14 @@ export class AppModule {
   static forRoot(settings: Settings): DynamicModule {
     return {
       module: AppModule,
-      imports: [ConfigModule.forRoot(settings), DatabaseModule, ScheduleModule.forRoot(), HealthModule],
+      imports: [
+        ConfigModule.forRoot(settings),
+        DatabaseModule,
+        ScheduleModule.forRoot(),
+        HealthModule,
+        LedgerModule,
+        VersionsModule,
+      ],
       providers: [
         { provide: APP_INTERCEPTOR, useClass: BodyInterceptor },
         { provide: APP_PIPE, useClass: ValidationPipe },

@@ -1,5 +1,5 @@
 import type { Page } from '@siltlight/common/wire/shared';
-import { problem } from './problem';
+import { type Problem, problem } from './problem';
 
 export interface PageSource<Row, Item> {
   /** reads up to `count` rows in a stable order, beginning after the row with the sort key `after` */
@@ -30,14 +30,22 @@ export function writeCursor(key: string): string {
 
 export function readCursor(cursor: string): string {
   const key = Buffer.from(cursor, 'base64url').toString('utf8');
-  if (key === '' || writeCursor(key) !== cursor) {
-    throw problem(
-      422,
-      'invalid-cursor',
-      'The cursor cannot be used',
-      'Take it from nextCursor of the page before.',
-      [{ pointer: '?cursor', field: 'cursor', value: cursor, message: 'This is no cursor of this list.' }],
-    );
-  }
+  if (key === '' || writeCursor(key) !== cursor) throw unusable(cursor);
   return key;
+}
+
+/** For lists that are ordered by a whole number. */
+export function numberOfCursor(key: string): number {
+  if (!/^\d{1,15}$/.test(key)) throw unusable(writeCursor(key));
+  return Number(key);
+}
+
+function unusable(cursor: string): Problem {
+  return problem(
+    422,
+    'invalid-cursor',
+    'The cursor cannot be used',
+    'Take it from nextCursor of the page before.',
+    [{ pointer: '?cursor', field: 'cursor', value: cursor, message: 'This is no cursor of this list.' }],
+  );
 }

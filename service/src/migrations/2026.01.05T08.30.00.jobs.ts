@@ -22,7 +22,7 @@ export const up: Migration = async ({ context }) => {
       finished_at TEXT
     ) STRICT`);
   await run(`
-    CREATE UNIQUE INDEX jobs_open_once ON jobs (kind, dedupe_key)
+    CREATE UNIQUE INDEX jobs_open_once ON jobs (person_id, kind, dedupe_key)
     WHERE dedupe_key IS NOT NULL AND state IN ('queued', 'running')`);
   await run('CREATE INDEX jobs_of_person ON jobs (person_id, id)');
   await run("CREATE INDEX jobs_open ON jobs (state, id) WHERE state IN ('queued', 'running')");

@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { pageOf, personMark } from './shared';
 
 /**
  * People of one installation, as they cross the wire.
@@ -53,11 +54,7 @@ const rolesGiven = z
   .max(ROLES.length)
   .refine((roles) => new Set(roles).size === roles.length, 'Name each role once.');
 
-/** A person as colleagues see them beside their work. */
-export const personBrief = z.object({ id: z.string(), name: z.string(), initials: z.string() });
-export type PersonBrief = z.infer<typeof personBrief>;
-
-export const personView = personBrief.extend({
+export const personView = personMark.extend({
   email: z.string(),
   orcid: z.string().nullable(),
   roles: z.array(role),
@@ -67,12 +64,7 @@ export const personView = personBrief.extend({
 });
 export type PersonView = z.infer<typeof personView>;
 
-export const peopleQuery = z.strictObject({
-  limit: z.coerce.number().int().min(1).max(200).default(50),
-  cursor: z.string().max(200).optional(),
-});
-export const peoplePage = z.object({ items: z.array(personView), nextCursor: z.string().nullable() });
-export type PeoplePage = z.infer<typeof peoplePage>;
+export const peoplePage = pageOf(personView);
 
 /** Absent fields stay as they are. `version` may be given in If-Match instead. */
 export const changePerson = z

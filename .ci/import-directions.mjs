@@ -85,6 +85,7 @@ const serviceRooms = [
   'slices',
   'fields',
   'optics',
+  'backdrops',
   'estimates',
   'calculators',
   'exports',

@@ -4,10 +4,13 @@ import { ScheduleModule } from '@nestjs/schedule';
 import { ConfigModule } from './config/config.module';
 import type { Settings } from './config/settings';
 import { DatabaseModule } from './database/database.module';
+import { FilesModule } from './files/files.module';
 import { HealthModule } from './health/health.module';
 import { BodyInterceptor } from './http/json-body';
 import { ValidationPipe } from './http/validation.pipe';
+import { JobsModule } from './jobs/jobs.module';
 import { LedgerModule } from './ledger/ledger.module';
+import { NotificationsModule } from './notifications/notifications.module';
 import { VersionsModule } from './versions/versions.module';
 
 /** Each feature adds one line here. */
@@ -20,8 +23,11 @@ export class AppModule {
         ConfigModule.forRoot(settings),
         DatabaseModule,
         ScheduleModule.forRoot(),
+        FilesModule,
         HealthModule,
+        JobsModule,
         LedgerModule,
+        NotificationsModule,
         VersionsModule,
       ],
       providers: [

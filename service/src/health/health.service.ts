@@ -76,6 +76,8 @@ export class HealthService implements BeforeApplicationShutdown {
       "SELECT min(created_at) AS oldest FROM outbox WHERE state = 'waiting'",
       { type: QueryTypes.SELECT },
     );
+    if (!this.settings.smtp && !this.settings.demo)
+      return { ok: true, detail: 'no mail server is configured: mail waits' };
     const ageMs = row?.oldest ? Date.now() - Date.parse(row.oldest) : 0;
     return { ok: ageMs <= MAX_OUTBOX_AGE_MS, detail: `oldest waiting mail ${Math.round(ageMs / 1000)} s` };
   }

@@ -18,9 +18,6 @@ function freezePrototypes(): void {
     Symbol,
     RegExp,
     Date,
-    Error,
-    TypeError,
-    RangeError,
     Promise,
     Map,
     Set,
@@ -28,6 +25,8 @@ function freezePrototypes(): void {
     ArrayBuffer,
   ];
   for (const { prototype } of builtIns) Object.freeze(prototype);
+  // Errors are named by assignment, also within Node.js, which frozen prototypes would turn into failures.
+  for (const { prototype } of [Error, TypeError, RangeError, SyntaxError]) Object.seal(prototype);
 }
 
 const loadParser = (): SpreadsheetParser => {

@@ -30,7 +30,7 @@ export interface SpreadsheetParser {
   SSF: DateFormats;
 }
 
-const options: ParsingOptions = {
+const parserOptions: ParsingOptions = {
   type: 'buffer',
   dense: true,
   cellFormula: true,
@@ -50,13 +50,16 @@ export async function readWorkbook(
   const members = request.container === 'zip' ? await checkedMembers(request) : null;
   const bytes = members ? null : await checkedOle(request);
   const parser = loadParser();
+  // Without stubs a formula that has no stored value would be dropped; in .ods they would fill whole blank columns.
+  const options = { ...parserOptions, sheetStubs: request.format === 'xlsx' || request.format === 'xlsm' };
   const book = parsed(request.fileName, () =>
     members ? parser.parse_zip(archiveOf(members, parser), options) : parser.read(bytes!, options),
   );
   const notes: ReadNote[] = [];
   const tally: CellTally = { cells: 0, formulas: 0, formulasWithoutValue: 0 };
-  for (const [index, name] of book.SheetNames.entries())
+  for (const [index, name] of book.SheetNames.entries()) {
     await sendSheet(book, index, name, { request, parser, tally, notes, post });
+  }
   notes.push(...notesOf(book, tally));
   return notes;
 }

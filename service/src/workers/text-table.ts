@@ -146,6 +146,7 @@ const blankCutter =
 class RowSender {
   count = 0;
   private cells = 0;
+  private blanks = 0;
   private waiting: WireCell[][] = [];
   private waitingCells = 0;
 
@@ -158,7 +159,11 @@ class RowSender {
     const { limits, fileName } = this.request;
     for (const fields of rows) {
       const row = trimmed(fields);
-      if (row.length === 0 && this.count + 1 > limits.textRows) continue;
+      if (row.length === 0) {
+        this.blanks += 1;
+        continue;
+      }
+      this.placeBlanks();
       const where = `"${fileName}", row ${countInWords(this.count + 1)}`;
       if (this.count >= limits.textRows) throw tooManyRows(fileName, limits.textRows);
       if (row.length > limits.columns) throw tooManyColumns(where, row.length, limits.columns);
@@ -178,6 +183,15 @@ class RowSender {
       if (this.waitingCells >= cellsPerMessage) await this.flush();
     }
     return 'taken';
+  }
+
+  /** Blank rows count only when something follows them. */
+  private placeBlanks(): void {
+    const room = Math.max(0, Math.min(this.blanks, this.request.limits.textRows - this.count));
+    for (let i = 0; i < room; i += 1) this.waiting.push([]);
+    this.waitingCells += room;
+    this.count += room;
+    this.blanks = 0;
   }
 
   async flush(): Promise<void> {

@@ -51,9 +51,13 @@ export class UploadRefused extends Error {
     readonly limit?: number,
   ) {
     super(detail);
-    this.name = 'UploadRefused';
     this.status = answers[code].status;
     this.title = answers[code].title;
+  }
+
+  /** A getter, because assigning a name fails where prototypes are frozen. */
+  override get name(): string {
+    return 'UploadRefused';
   }
 }
 

@@ -47,9 +47,10 @@ export function partsFor(members: ZipMembers, format: UploadFormat): ZipMembers 
 function formatOfParts(members: ZipMembers): 'xlsx' | 'xlsb' | 'ods' | null {
   const types = members.get('[Content_Types].xml')?.toString('latin1');
   if (types !== undefined) {
-    if (/sheet\.binary\.macroEnabled\.main/.test(types)) return 'xlsb';
     if (/(spreadsheetml\.(sheet|template)|sheet\.macroEnabled|template\.macroEnabled)\.main\+xml/.test(types))
       return 'xlsx';
+    // The binary type may also stand as the default of .bin parts in a workbook of the other kind.
+    if (/sheet\.binary\.macroEnabled\.main/.test(types)) return 'xlsb';
     return null;
   }
   const mediaType =

@@ -1,6 +1,7 @@
 import { type DynamicModule, Module } from '@nestjs/common';
 import { APP_INTERCEPTOR, APP_PIPE } from '@nestjs/core';
 import { ScheduleModule } from '@nestjs/schedule';
+import { AuthModule } from './auth/auth.module';
 import { ConfigModule } from './config/config.module';
 import type { Settings } from './config/settings';
 import { DatabaseModule } from './database/database.module';
@@ -11,6 +12,7 @@ import { ValidationPipe } from './http/validation.pipe';
 import { JobsModule } from './jobs/jobs.module';
 import { LedgerModule } from './ledger/ledger.module';
 import { NotificationsModule } from './notifications/notifications.module';
+import { UsersModule } from './users/users.module';
 import { VersionsModule } from './versions/versions.module';
 
 /** Each feature adds one line here. */
@@ -23,11 +25,13 @@ export class AppModule {
         ConfigModule.forRoot(settings),
         DatabaseModule,
         ScheduleModule.forRoot(),
+        AuthModule,
         FilesModule,
         HealthModule,
         JobsModule,
         LedgerModule,
         NotificationsModule,
+        UsersModule,
         VersionsModule,
       ],
       providers: [

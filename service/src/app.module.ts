@@ -2,9 +2,11 @@ import { type DynamicModule, Module } from '@nestjs/common';
 import { APP_INTERCEPTOR, APP_PIPE } from '@nestjs/core';
 import { ScheduleModule } from '@nestjs/schedule';
 import { AuthModule } from './auth/auth.module';
+import { BackdropsModule } from './backdrops/backdrops.module';
 import { ConfigModule } from './config/config.module';
 import type { Settings } from './config/settings';
 import { DatabaseModule } from './database/database.module';
+import { DatasetsModule } from './datasets/datasets.module';
 import { FilesModule } from './files/files.module';
 import { HealthModule } from './health/health.module';
 import { BodyInterceptor } from './http/json-body';
@@ -12,6 +14,9 @@ import { ValidationPipe } from './http/validation.pipe';
 import { JobsModule } from './jobs/jobs.module';
 import { LedgerModule } from './ledger/ledger.module';
 import { NotificationsModule } from './notifications/notifications.module';
+import { OpticsModule } from './optics/optics.module';
+import { RegionsModule } from './regions/regions.module';
+import { SlicesModule } from './slices/slices.module';
 import { UsersModule } from './users/users.module';
 import { VersionsModule } from './versions/versions.module';
 
@@ -26,11 +31,16 @@ export class AppModule {
         DatabaseModule,
         ScheduleModule.forRoot(),
         AuthModule,
+        BackdropsModule,
+        DatasetsModule,
         FilesModule,
         HealthModule,
         JobsModule,
         LedgerModule,
         NotificationsModule,
+        OpticsModule,
+        RegionsModule,
+        SlicesModule,
         UsersModule,
         VersionsModule,
       ],

@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
 import type { PersonState, PersonView, Role } from '@siltlight/common/wire/people';
 import { ROLES } from '@siltlight/common/wire/people';
+import type { PersonMark } from '@siltlight/common/wire/shared';
 import { Op, type Transaction } from 'sequelize';
 import type { Person } from '../auth/policy';
 import { initialsOf } from './initials';
@@ -30,6 +31,23 @@ export class PeopleService {
 
   count(transaction?: Transaction): Promise<number> {
     return this.people.count(inside(transaction));
+  }
+
+  /** As others see a person. What came with the product was done by nobody in particular. */
+  async mark(id: string, transaction?: Transaction): Promise<PersonMark> {
+    const row = await this.people.findByPk(id, inside(transaction));
+    if (!row) return { id, name: 'Shipped with the product', initials: '–' };
+    return { id: row.id, name: row.name, initials: row.initials };
+  }
+
+  /** Everybody who can sign in and holds a role. */
+  withRole(role: Role, transaction?: Transaction): Promise<PersonRow[]> {
+    return this.people.findAll({
+      where: { disabledAt: null, passwordHash: { [Op.ne]: null } },
+      include: { model: PersonRoleRow, where: { role }, required: true },
+      order: [['id', 'ASC']],
+      ...inside(transaction),
+    });
   }
 
   /** In the order of their coming, which is the order of their identifiers. */

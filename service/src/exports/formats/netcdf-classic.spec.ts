@@ -1,7 +1,7 @@
 import { NetCDFReader } from 'netcdfjs';
-import { writeNetcdfClassic } from './netcdf-classic';
+import { type NcDataset, writeNetcdfClassic } from './netcdf-classic';
 
-const grid = {
+const grid: NcDataset = {
   dimensions: { lat: 2, lon: 3, region: 2, name_length: 5 },
   attributes: {
     Conventions: 'CF-1.11',

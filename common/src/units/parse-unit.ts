@@ -54,27 +54,30 @@ function evaluate(tokens: UnitToken[], unit: Unit, options: ParseUnitOptions): U
   const signs: number[] = [1];
   let divideNext = false;
   let counted = 0;
-  for (let i = 0; i < tokens.length; i += 1) {
-    const token = tokens[i];
-    if (!token || token.kind === 'power') continue;
-    if (token.kind === 'divide') divideNext = true;
-    else if (token.kind === 'close') signs.pop();
-    else {
-      const sign = (signs.at(-1) ?? 1) * (divideNext ? -1 : 1);
-      if (!options.slashCoversRest) divideNext = false;
-      if (token.kind === 'open') signs.push(sign);
-      else {
-        const next = tokens[i + 1];
-        const exponent = sign * (next?.kind === 'power' ? next.exponent : 1);
-        const failed =
-          token.kind === 'number'
-            ? applyNumber(unit, token.value, exponent)
-            : applySymbol(unit, token.text, exponent, sign);
-        if (failed) return failed;
-        counted += 1;
-      }
-      if (token.kind === 'open' && options.slashCoversRest) divideNext = false;
+  for (const [i, token] of tokens.entries()) {
+    if (token.kind === 'power') continue;
+    if (token.kind === 'divide') {
+      divideNext = true;
+      continue;
     }
+    if (token.kind === 'close') {
+      signs.pop();
+      continue;
+    }
+    const sign = (signs.at(-1) ?? 1) * (divideNext ? -1 : 1);
+    if (!options.slashCoversRest || token.kind === 'open') divideNext = false;
+    if (token.kind === 'open') {
+      signs.push(sign);
+      continue;
+    }
+    const next = tokens[i + 1];
+    const exponent = sign * (next?.kind === 'power' ? next.exponent : 1);
+    const failed =
+      token.kind === 'number'
+        ? applyNumber(unit, token.value, exponent)
+        : applySymbol(unit, token.text, exponent, sign);
+    if (failed) return failed;
+    if (token.kind === 'number' || !INERT.has(token.text.toLowerCase())) counted += 1;
   }
   if (counted === 0) return problem('unknown-unit', unit.text, `"${unit.text}" is no known unit`);
   return unit;

@@ -3,7 +3,9 @@ export type UnitToken =
   | { kind: 'symbol'; text: string }
   | { kind: 'number'; value: number }
   | { kind: 'power'; exponent: number }
-  | { kind: 'divide' | 'open' | 'close' };
+  | { kind: 'divide' }
+  | { kind: 'open' }
+  | { kind: 'close' };
 
 const SUPERSCRIPTS = '⁰¹²³⁴⁵⁶⁷⁸⁹⁺⁻';
 const PLAIN = '0123456789+-';

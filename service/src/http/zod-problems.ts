@@ -11,10 +11,13 @@ export function invalidInput(error: z.ZodError, input: unknown, place: InputPlac
   return new Problem(422, 'invalid-input', 'The input is not valid', { detail: `${first}${more}`, errors });
 }
 
+/** What is typed into such a field is never sent back. */
+const SECRET = /password|token|secret/i;
+
 function describeIssue(issue: z.core.$ZodIssue, input: unknown, place: InputPlace): ProblemError {
   const path = issue.path.map(String);
   const field = path.join('.');
-  const value = shown(valueAt(input, path));
+  const value = SECRET.test(field) ? undefined : shown(valueAt(input, path));
   return {
     pointer:
       place === 'query'
@@ -50,7 +53,7 @@ function valueAt(input: unknown, path: string[]): unknown {
   );
 }
 
-/** Only small plain values are sent back; passwords are checked by schemas of their own and never echoed. */
+/** Only small plain values are sent back. */
 function shown(value: unknown): unknown {
   if (typeof value === 'number' || typeof value === 'boolean' || value === null) return value;
   return typeof value === 'string' && value.length <= 200 ? value : undefined;

@@ -7,6 +7,7 @@ import { ConfigModule } from './config/config.module';
 import type { Settings } from './config/settings';
 import { DatabaseModule } from './database/database.module';
 import { DatasetsModule } from './datasets/datasets.module';
+import { FieldsModule } from './fields/fields.module';
 import { FilesModule } from './files/files.module';
 import { HealthModule } from './health/health.module';
 import { BodyInterceptor } from './http/json-body';
@@ -33,6 +34,7 @@ export class AppModule {
         AuthModule,
         BackdropsModule,
         DatasetsModule,
+        FieldsModule,
         FilesModule,
         HealthModule,
         JobsModule,

@@ -38,7 +38,8 @@ export class SignInThrottle {
 
   private requireFree(key: string): void {
     const waitMs = (this.failures.get(key)?.freeAtMs ?? 0) - Date.now();
-    if (waitMs > 0) throw tooManyTries(Math.ceil(waitMs / 1000));
+    // Longer than any wait we give: the clock was set back meanwhile, which is not the caller's fault.
+    if (waitMs > 0 && waitMs <= LONGEST_WAIT_MS) throw tooManyTries(Math.ceil(waitMs / 1000));
   }
 
   private countFailure(keys: { account: string; address: string }): void {
@@ -49,7 +50,7 @@ export class SignInThrottle {
       const beyond = count - FREE_TRIES[kind];
       const waitMs = beyond < 0 ? 0 : Math.min(LONGEST_WAIT_MS, 1000 * 2 ** Math.min(beyond, 10));
       this.failures.delete(keys[kind]);
-      this.failures.set(keys[kind], { count, lastMs: now, freeAtMs: now + waitMs });
+      this.failures.set(keys[kind], { count, lastMs: now, freeAtMs: waitMs === 0 ? 0 : now + waitMs });
     }
     while (this.failures.size > MOST_KEYS) this.failures.delete(this.failures.keys().next().value!);
   }

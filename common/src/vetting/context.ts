@@ -42,4 +42,8 @@ export interface VettingContext {
   limits: Record<string, Record<string, number>>;
   /** raw text that was resolved to "missing" or below detection, by code */
   missingCodes: Record<string, number>;
+  /** dataset kind; `dust-flux` when absent */
+  kind?: 'dust-flux' | 'point-optical-depth';
+  /** rows of the upload this one replaces, for the list of differences */
+  earlierRows?: SampleRow[];
 }

@@ -20,6 +20,8 @@ export interface RuleHit {
   remedyKind: RemedyKind;
   /** a text that would mend the cell, to be offered */
   proposal?: string;
+  /** tells hits in the same place apart in their key, when the field alone does not: a site, a code */
+  subject?: string;
 }
 
 export interface Finding extends Required<Pick<RuleHit, 'severity'>>, Omit<RuleHit, 'severity'> {

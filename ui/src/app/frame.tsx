@@ -1,5 +1,12 @@
 import { useEffect, useMemo, useRef, useState } from 'react';
-import { Outlet, redirect, useLocation, useNavigation, useNavigationType, type LoaderFunction } from 'react-router-dom';
+import {
+  Outlet,
+  redirect,
+  useLocation,
+  useNavigation,
+  useNavigationType,
+  type LoaderFunction,
+} from 'react-router-dom';
 import { queryClient } from '../shared/api/query-client';
 import { sessionQuery, usePerson, useSession } from '../shared/api/session';
 import { Toasts } from '../shared/feedback/toasts';
@@ -52,7 +59,13 @@ export function Frame() {
             <TopBar sections={sections} />
           </>
         )}
-        <main id="page" ref={main} tabIndex={-1} className={waiting ? 'frame-page waiting' : 'frame-page'} aria-busy={waiting}>
+        <main
+          id="page"
+          ref={main}
+          tabIndex={-1}
+          className={waiting ? 'frame-page waiting' : 'frame-page'}
+          aria-busy={waiting}
+        >
           <Outlet />
         </main>
       </div>

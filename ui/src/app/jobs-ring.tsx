@@ -13,24 +13,35 @@ const ROUND = 2 * Math.PI * RADIUS;
 
 /** Jobs in progress: how many, how far, and the list behind it; says so when one is over. */
 export function JobsRing() {
-  const jobs = useQuery(activeJobsQuery).data?.filter((job) => !isOver(job)) ?? [];
+  const jobs = useQuery(activeJobsQuery).data ?? [];
   useAnnounceFinished(jobs);
   const share = jobs.length === 0 ? 0 : jobs.reduce((sum, job) => sum + job.progress, 0) / jobs.length;
-  const name = jobs.length === 0 ? 'No job in progress' : `${counted(jobs.length, 'job')} in progress, ${Math.round(share * 100)} %`;
+  const name =
+    jobs.length === 0
+      ? 'No job in progress'
+      : `${counted(jobs.length, 'job')} in progress, ${Math.round(share * 100)} %`;
   return (
     <Popover positioning="below-end" trapFocus>
       <PopoverTrigger disableButtonEnhancement>
         <button type="button" className="jobs-ring" aria-label={name} title={name}>
           <svg width="24" height="24" viewBox="0 0 24 24" aria-hidden="true">
             <circle cx="12" cy="12" r={RADIUS} />
-            <circle cx="12" cy="12" r={RADIUS} strokeDasharray={`${ROUND * share} ${ROUND}`} transform="rotate(-90 12 12)" />
+            <circle
+              cx="12"
+              cy="12"
+              r={RADIUS}
+              strokeDasharray={`${ROUND * share} ${ROUND}`}
+              transform="rotate(-90 12 12)"
+            />
           </svg>
           {jobs.length > 0 && <span aria-hidden="true">{jobs.length}</span>}
         </button>
       </PopoverTrigger>
       <PopoverSurface className="jobs-list" aria-label="Jobs in progress">
         <b>Jobs in progress</b>
-        {jobs.length === 0 && <p className="sl-13 sl-muted">Nothing runs. Long work shows here with its progress.</p>}
+        {jobs.length === 0 && (
+          <p className="sl-13 sl-muted">Nothing runs. Long work shows here with its progress.</p>
+        )}
         {jobs.map((job) => (
           <JobCard key={job.id} job={job} />
         ))}
@@ -54,7 +65,11 @@ function useAnnounceFinished(jobs: readonly JobSummary[]): void {
         async (job) => {
           if (!isOver(job)) return;
           if (job.state === 'failed') say(`${job.title} failed`, job.error, 'error');
-          else say(`${job.title} is ${job.state}`, job.resultPath && <Link to={job.resultPath}>Open the result</Link>);
+          else
+            say(
+              `${job.title} is ${job.state}`,
+              job.resultPath && <Link to={job.resultPath}>Open the result</Link>,
+            );
           await client.invalidateQueries({ predicate: (query) => query.queryKey[0] !== 'session' });
         },
         (error: unknown) => say('A job ended, but its outcome could not be read', String(error), 'warning'),

@@ -34,9 +34,14 @@ export function PersonMenu() {
     onError: (error) => say('You are still signed in', error.message, 'error'),
   });
   return (
-    <Menu checkedValues={{ theme: [choice] }} onCheckedValueChange={(_, data) => choose(data.checkedItems[0] as ThemeChoice)}>
+    <Menu
+      checkedValues={{ theme: [choice] }}
+      onCheckedValueChange={(_, data) => choose(data.checkedItems[0] as ThemeChoice)}
+    >
       <MenuTrigger disableButtonEnhancement>
-        <Avatar as="button" type="button" className="person-button" size={28} initials={person.initials} color="neutral" aria-label={`${person.name}: menu`} />
+        <button type="button" className="person-button" aria-label={`${person.name}: menu`}>
+          <Avatar size={28} initials={person.initials} color="neutral" aria-hidden />
+        </button>
       </MenuTrigger>
       <MenuPopover>
         <MenuList>
@@ -54,9 +59,15 @@ export function PersonMenu() {
           <MenuDivider />
           <MenuGroup>
             <MenuGroupHeader>Theme</MenuGroupHeader>
-            <MenuItemRadio name="theme" value="system">As the system</MenuItemRadio>
-            <MenuItemRadio name="theme" value="light">Light</MenuItemRadio>
-            <MenuItemRadio name="theme" value="dark">Dark</MenuItemRadio>
+            <MenuItemRadio name="theme" value="system">
+              As the system
+            </MenuItemRadio>
+            <MenuItemRadio name="theme" value="light">
+              Light
+            </MenuItemRadio>
+            <MenuItemRadio name="theme" value="dark">
+              Dark
+            </MenuItemRadio>
           </MenuGroup>
           <MenuDivider />
           <MenuItem onClick={() => leave.mutate()}>Sign out</MenuItem>

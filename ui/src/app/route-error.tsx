@@ -14,7 +14,11 @@ export function RouteError() {
       <h1 tabIndex={-1} className="page-fault">
         This page could not be shown
       </h1>
-      <ErrorState error={error} kept="Nothing that was saved is lost." retry={() => retry(error, revalidate)} />
+      <ErrorState
+        error={error}
+        kept="Nothing that was saved is lost."
+        retry={() => retry(error, revalidate)}
+      />
     </>
   );
 }

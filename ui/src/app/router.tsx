@@ -18,6 +18,7 @@ const pages: RouteObject[] = [
   { path: 'ledger', lazy: lazyPage(() => import('../routes/ledger')) },
   { path: 'administration', lazy: lazyPage(() => import('../routes/administration')) },
   { path: 'profile', lazy: lazyPage(() => import('../routes/profile')) },
+  { path: 'account', loader: () => redirect('/profile') }, // as mails call it
   { path: '*', element: <NotFound /> },
 ];
 
@@ -28,6 +29,7 @@ export const routes: RouteObject[] = [
     children: [
       { path: 'sign-in', lazy: lazyPage(() => import('../routes/sign-in')) },
       { path: 'first-administrator', lazy: lazyPage(() => import('../routes/first-administrator')) },
+      { path: 'reset-password', lazy: lazyPage(() => import('../routes/reset-password')) },
       { path: 'accept-invitation', lazy: lazyPage(() => import('../routes/accept-invitation')) },
       {
         path: '/',

@@ -4,11 +4,11 @@ import { keepPreviousData, useQuery } from '@tanstack/react-query';
 import { useDeferredValue, useEffect, useId, useRef, useState, type KeyboardEvent } from 'react';
 import { useNavigate } from 'react-router-dom';
 import { api } from '../shared/api/client';
-import { listOf } from '../shared/jobs/queries';
+import { listOf, type Listed } from '../shared/jobs/queries';
 
 const searchFor = (text: string) => ({
   queryKey: ['search', text],
-  queryFn: () => listOf(api.get<SearchHit[] | { items: SearchHit[] }>('/search', { params: { q: text } })),
+  queryFn: () => listOf(api.get<Listed<SearchHit>>('/search', { params: { q: text } })),
   enabled: text.length > 0,
   placeholderData: keepPreviousData,
 });
@@ -47,7 +47,14 @@ export function SearchBox({ focusFirst, onDone }: { focusFirst?: boolean; onDone
   return (
     <div className={onDone ? 'frame-search out' : 'frame-search'} role="search">
       <FluentSearchBox
-        input={{ ref: input, role: 'combobox', 'aria-expanded': shown, 'aria-controls': shown ? id : undefined, 'aria-autocomplete': 'list', 'aria-activedescendant': shown && hits[at] ? `${id}-${at}` : undefined }}
+        input={{
+          ref: input,
+          role: 'combobox',
+          'aria-expanded': shown,
+          'aria-controls': shown ? id : undefined,
+          'aria-autocomplete': 'list',
+          'aria-activedescendant': shown && hits[at] ? `${id}-${at}` : undefined,
+        }}
         aria-label="Search slices, datasets, sites and estimates"
         placeholder="Slice, dataset, site, estimate"
         value={text}
@@ -62,10 +69,18 @@ export function SearchBox({ focusFirst, onDone }: { focusFirst?: boolean; onDone
       {shown && (
         <div className="search-hits" onMouseDown={(event) => event.preventDefault()}>
           {isError && <p role="alert">The search did not come through. Type on to try again.</p>}
-          {!isError && hits.length === 0 && <p role="status">{isFetching ? 'Searching' : `Nothing is named “${wanted}”.`}</p>}
+          {!isError && hits.length === 0 && (
+            <p role="status">{isFetching ? 'Searching' : `Nothing is named “${wanted}”.`}</p>
+          )}
           <ul role="listbox" id={id} aria-label="Found">
             {hits.map((hit, index) => (
-              <li key={hit.path + hit.title} id={`${id}-${index}`} role="option" aria-selected={index === at} onClick={() => go(hit)}>
+              <li
+                key={hit.path + hit.title}
+                id={`${id}-${index}`}
+                role="option"
+                aria-selected={index === at}
+                onClick={() => go(hit)}
+              >
                 <Marked text={hit.title} part={wanted} />
                 <span>{hit.detail ? `${hit.kind}, ${hit.detail}` : hit.kind}</span>
               </li>
@@ -94,7 +109,8 @@ function useSlashFocus(input: React.RefObject<HTMLInputElement | null>, focusFir
   useEffect(() => {
     if (focusFirst) input.current?.focus();
     const listen = (event: globalThis.KeyboardEvent) => {
-      const typing = event.target instanceof HTMLElement && /^(INPUT|TEXTAREA|SELECT)$/.test(event.target.tagName);
+      const typing =
+        event.target instanceof HTMLElement && /^(INPUT|TEXTAREA|SELECT)$/.test(event.target.tagName);
       if (event.key !== '/' || typing || event.ctrlKey || event.metaKey) return;
       event.preventDefault();
       input.current?.focus();

@@ -21,7 +21,8 @@ const inMenu: readonly Section[] = [
 
 const mailbox: Section = { title: 'Mailbox', path: '/mailbox', key: 'm' };
 
-const open = (person: PersonView) => (section: Section) => !section.roles || hasRole(person, ...section.roles);
+const open = (person: PersonView) => (section: Section) =>
+  !section.roles || hasRole(person, ...section.roles);
 
 export const sectionsOf = (person: PersonView) => sections.filter(open(person));
 

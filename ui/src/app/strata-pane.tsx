@@ -22,8 +22,11 @@ function usePickedSlice() {
   const { slug } = useParams();
   const declared = useDeclaredSlice();
   const inList = listsBySlice.includes(pathname);
-  const selected = pathname.startsWith('/slices/') ? (slug ?? null) : (declared ?? new URLSearchParams(search).get('slice'));
-  const addressOf = (one: string) => (inList ? `${pathname}?slice=${encodeURIComponent(one)}` : `/slices/${encodeURIComponent(one)}`);
+  const selected = pathname.startsWith('/slices/')
+    ? (slug ?? null)
+    : (declared ?? new URLSearchParams(search).get('slice'));
+  const addressOf = (one: string) =>
+    inList ? `${pathname}?slice=${encodeURIComponent(one)}` : `/slices/${encodeURIComponent(one)}`;
   return { selected, addressOf };
 }
 
@@ -46,7 +49,11 @@ export function StrataPane({ open, onToggle }: { open: boolean; onToggle: () => 
         )}
       </div>
       <div className="frame-beds" ref={ref}>
-        {isError && <Button size="small" appearance="subtle" onClick={() => void refetch()}>Load slices again</Button>}
+        {isError && (
+          <Button size="small" appearance="subtle" onClick={() => void refetch()}>
+            Load slices again
+          </Button>
+        )}
         {slices.length > 0 && <StrataColumn {...{ slices, open, heightPx, ...picked }} />}
       </div>
       <div className="frame-foot">
@@ -63,7 +70,15 @@ export function StrataPane({ open, onToggle }: { open: boolean; onToggle: () => 
             </small>
           </div>
         )}
-        <Button appearance="subtle" size="small" aria-label={toggle} title={toggle} aria-expanded={open} onClick={onToggle} icon={open ? <ChevronDoubleLeft20Regular /> : <ChevronDoubleRight20Regular />} />
+        <Button
+          appearance="subtle"
+          size="small"
+          aria-label={toggle}
+          title={toggle}
+          aria-expanded={open}
+          onClick={onToggle}
+          icon={open ? <ChevronDoubleLeft20Regular /> : <ChevronDoubleRight20Regular />}
+        />
       </div>
     </nav>
   );

@@ -22,7 +22,11 @@ export function TopBar({ sections }: { sections: readonly Section[] }) {
       </Link>
       <nav className="frame-tabs" aria-label="Sections">
         {sections.map((section) => (
-          <Link key={section.path} to={section.path} aria-current={isWithin(section, pathname) ? 'page' : undefined}>
+          <Link
+            key={section.path}
+            to={section.path}
+            aria-current={isWithin(section, pathname) ? 'page' : undefined}
+          >
             {section.title}
             {section.path === '/intake' && waiting > 0 && (
               <span className="frame-count" aria-label={`${waiting} waiting`}>
@@ -55,7 +59,11 @@ export function NarrowTopBar({ sections }: { sections: readonly Section[] }) {
         <MenuPopover>
           <MenuList>
             {sections.map((section) => (
-              <MenuItem key={section.path} aria-current={section === here ? 'page' : undefined} onClick={() => void navigate(section.path)}>
+              <MenuItem
+                key={section.path}
+                aria-current={section === here ? 'page' : undefined}
+                onClick={() => void navigate(section.path)}
+              >
                 {section.title}
               </MenuItem>
             ))}
@@ -67,7 +75,12 @@ export function NarrowTopBar({ sections }: { sections: readonly Section[] }) {
       </Link>
       <span className="frame-here">{here?.title}</span>
       <span className="sl-grow" />
-      <Button appearance="subtle" icon={<Search20Regular />} aria-label="Search" onClick={() => setSearching(true)} />
+      <Button
+        appearance="subtle"
+        icon={<Search20Regular />}
+        aria-label="Search"
+        onClick={() => setSearching(true)}
+      />
       <JobsRing />
       <PersonMenu />
       {searching && <SearchBox focusFirst onDone={() => setSearching(false)} />}

@@ -5,7 +5,8 @@ import type { Section } from './sections';
 const PAUSE_MS = 1200;
 
 const isTyping = (target: EventTarget | null) =>
-  target instanceof HTMLElement && (target.isContentEditable || /^(INPUT|TEXTAREA|SELECT)$/.test(target.tagName));
+  target instanceof HTMLElement &&
+  (target.isContentEditable || /^(INPUT|TEXTAREA|SELECT)$/.test(target.tagName));
 
 /** `g` and then a letter goes to a section; nothing happens while somebody types. */
 export function useSectionKeys(sections: readonly Section[]): void {

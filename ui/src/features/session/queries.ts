@@ -17,8 +17,10 @@ export const signInOptionsQuery = queryOptions({
 
 export const signIn = (credentials: SignInRequest) => api.post<SessionAnswer>('/auth/sign-in', credentials);
 export const signOut = () => api.post<void>('/auth/sign-out');
-export const acceptInvitation = (body: AcceptInvitation) => api.post<SessionAnswer>('/auth/accept-invitation', body);
+export const acceptInvitation = (body: AcceptInvitation) =>
+  api.post<{ email: string }>('/auth/accept-invitation', body);
 export const makeFirstAdministrator = (body: FirstAdministrator) =>
-  api.post<SessionAnswer>('/auth/first-administrator', body);
-export const askForReset = (email: string) => api.post<void>('/auth/password-reset/request', { email });
-export const confirmReset = (body: PasswordResetConfirm) => api.post<void>('/auth/password-reset/confirm', body);
+  api.post<{ email: string }>('/auth/first-administrator', body);
+export const askForReset = (email: string) => api.post<void>('/auth/password-reset', { email });
+export const confirmReset = (body: PasswordResetConfirm) =>
+  api.post<{ email: string }>('/auth/password-reset/confirm', body);

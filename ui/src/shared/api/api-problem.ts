@@ -1,7 +1,13 @@
 import { isAxiosError } from 'axios';
 
 /** One fault at one place of what was sent; `pointer` is a JSON pointer into the body. */
-export type FieldFault = { pointer?: string; field?: string; message: string; value?: unknown; unit?: string };
+export type FieldFault = {
+  pointer?: string;
+  field?: string;
+  message: string;
+  value?: unknown;
+  unit?: string;
+};
 
 type ProblemBody = {
   status?: number;
@@ -44,7 +50,12 @@ export class ApiProblem extends Error {
 export function toApiProblem(error: unknown): ApiProblem {
   if (error instanceof ApiProblem) return error;
   if (!isAxiosError(error)) {
-    return new ApiProblem(0, 'client-fault', 'The page met a fault', error instanceof Error ? error.message : String(error));
+    return new ApiProblem(
+      0,
+      'client-fault',
+      'The page met a fault',
+      error instanceof Error ? error.message : String(error),
+    );
   }
   if (!error.response) {
     return new ApiProblem(0, 'no-answer', 'The service gave no answer', noAnswer(error.code));

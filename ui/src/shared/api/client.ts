@@ -37,7 +37,8 @@ export const api = {
     client.put<T>(path, body, options).then((answer) => answer.data),
   patch: <T>(path: string, body?: unknown, options?: Options) =>
     client.patch<T>(path, body, options).then((answer) => answer.data),
-  delete: <T>(path: string, options?: Options) => client.delete<T>(path, options).then((answer) => answer.data),
+  delete: <T>(path: string, options?: Options) =>
+    client.delete<T>(path, options).then((answer) => answer.data),
   /** Sends files with progress from 0 to 1; no time limit, as lines may be slow. */
   upload: <T>(path: string, form: FormData, report?: (progress01: number) => void, signal?: AbortSignal) =>
     client

@@ -47,5 +47,6 @@ export function usePerson(): PersonView {
   return person;
 }
 
-export const hasRole = (person: PersonView, ...roles: Role[]) => roles.some((role) => person.roles.includes(role));
+export const hasRole = (person: PersonView, ...roles: Role[]) =>
+  roles.some((role) => person.roles.includes(role));
 export const useHasRole = (...roles: Role[]) => hasRole(usePerson(), ...roles);

@@ -17,7 +17,13 @@ export type Rung = {
   other?: boolean;
 };
 
-type Props = { rungs: readonly Rung[]; unitInWords: string; labelPx?: number; rowPx?: number; showValues?: boolean };
+type Props = {
+  rungs: readonly Rung[];
+  unitInWords: string;
+  labelPx?: number;
+  rowPx?: number;
+  showValues?: boolean;
+};
 
 const FOOT_PX = 24;
 
@@ -30,17 +36,35 @@ export function IntervalLadder({ rungs, unitInWords, labelPx = 124, rowPx = 24, 
   const ticks = niceTicks(x.domain, Math.max(2, Math.floor((width - labelPx) / 80)));
   return (
     <div ref={ref}>
-      <svg width={width} height={bottom + FOOT_PX} role="img" aria-label={inWords(rungs, unitInWords)} className="ladder">
+      <svg
+        width={width}
+        height={bottom + FOOT_PX}
+        role="img"
+        aria-label={inWords(rungs, unitInWords)}
+        className="ladder"
+      >
         {ticks.map((tick) => (
           <g key={tick}>
-            <line x1={x(tick)} x2={x(tick)} y1={2} y2={bottom} className={tick === 0 ? 'zero-line' : 'grid-line'} />
+            <line
+              x1={x(tick)}
+              x2={x(tick)}
+              y1={2}
+              y2={bottom}
+              className={tick === 0 ? 'zero-line' : 'grid-line'}
+            />
             <text x={x(tick)} y={bottom + 16} textAnchor="middle" className="tick">
               {formatNumber(tick, { decimals: tickDecimals(ticks) })}
             </text>
           </g>
         ))}
         {rungs.map((rung, at) => (
-          <RungLine key={rung.label} rung={rung} x={x} y={at * rowPx + rowPx / 2} right={showValues ? width : null} />
+          <RungLine
+            key={rung.label}
+            rung={rung}
+            x={x}
+            y={at * rowPx + rowPx / 2}
+            right={showValues ? width : null}
+          />
         ))}
       </svg>
     </div>
@@ -69,12 +93,17 @@ const hasInterval = (rung: Rung): rung is Rung & { low: number; high: number } =
   typeof rung.low === 'number' && typeof rung.high === 'number';
 
 const valueText = (rung: Rung) =>
-  formatNumber(rung.value, { decimals: hasInterval(rung) ? decimalsForInterval(rung.low, rung.high) : 2, signed: true });
+  formatNumber(rung.value, {
+    decimals: hasInterval(rung) ? decimalsForInterval(rung.low, rung.high) : 2,
+    signed: true,
+  });
 
 const inWords = (rungs: readonly Rung[], unit: string) =>
   rungs
     .map((rung) => {
-      const range = hasInterval(rung) ? `, 90 % from ${formatNumber(rung.low, { figures: 2 })} to ${formatNumber(rung.high, { figures: 2 })}` : '';
+      const range = hasInterval(rung)
+        ? `, 90 % from ${formatNumber(rung.low, { figures: 2 })} to ${formatNumber(rung.high, { figures: 2 })}`
+        : '';
       return `${rung.label}: ${valueText(rung)}${range}`;
     })
     .join('; ') + ` ${unit}`;

@@ -33,31 +33,68 @@ const LEFT_PX = 46;
 const TOP_PX = 8;
 
 /** Lines and samples over age, month or size; the unit stands in the figure's head. */
-export function LineChart({ series, label, logY, bands = [], xTicks, xDomain, xTitle, heightPx = 184, signedY }: Props) {
+export function LineChart({
+  series,
+  label,
+  logY,
+  bands = [],
+  xTicks,
+  xDomain,
+  xTitle,
+  heightPx = 184,
+  signedY,
+}: Props) {
   const [ref, width] = useWidth(306);
   const { mode } = useColourMode();
   const points = series.flatMap((one) => one.points).filter((point) => !logY || point.y > 0);
   if (points.length === 0) return <p className="sl-13 sl-muted">No values to draw.</p>;
   const bottom = heightPx - (xTitle ? 36 : 22);
   const right = width - (series.length > 1 ? 64 : 12);
-  const ys = points.flatMap((point) => [point.y, point.low ?? point.y, point.high ?? point.y]).filter((y) => !logY || y > 0);
+  const ys = points
+    .flatMap((point) => [point.y, point.low ?? point.y, point.high ?? point.y])
+    .filter((y) => !logY || y > 0);
   const x = linearScale(xDomain ?? domainOf(points.map((point) => point.x)), [LEFT_PX, right]);
-  const y = logY ? logScale([Math.min(...ys) / 1.3, Math.max(...ys) * 1.3], [bottom, TOP_PX]) : linearScale(domainOf(ys, true), [bottom, TOP_PX]);
+  const y = logY
+    ? logScale([Math.min(...ys) / 1.3, Math.max(...ys) * 1.3], [bottom, TOP_PX])
+    : linearScale(domainOf(ys, true), [bottom, TOP_PX]);
   const yTicks = logY ? logTicks(y.domain) : niceTicks(y.domain, 4);
-  const xMarks = xTicks ?? niceTicks(x.domain, Math.max(3, Math.floor(width / 90))).map((at) => ({ at, text: formatNumber(at, { decimals: tickDecimals([at]) }) }));
-  const colours = series.map((one, at) => one.colour ?? seriesColours[mode][at % seriesColours[mode].length]!);
-  const labels = partLabels(series.map((one) => y(one.points.at(-1)?.y ?? 0)), 14);
+  const xMarks =
+    xTicks ??
+    niceTicks(x.domain, Math.max(3, Math.floor(width / 90))).map((at) => ({
+      at,
+      text: formatNumber(at, { decimals: tickDecimals([at]) }),
+    }));
+  const colours = series.map(
+    (one, at) => one.colour ?? seriesColours[mode][at % seriesColours[mode].length]!,
+  );
+  const labels = partLabels(
+    series.map((one) => y(one.points.at(-1)?.y ?? 0)),
+    14,
+  );
   return (
     <div ref={ref}>
       <svg width={width} height={heightPx} role="img" aria-label={label}>
         {bands.map((band) => (
-          <rect key={band.name} x={Math.min(x(band.from), x(band.to))} width={Math.abs(x(band.to) - x(band.from))} y={TOP_PX} height={bottom - TOP_PX} className="slice-band">
+          <rect
+            key={band.name}
+            x={Math.min(x(band.from), x(band.to))}
+            width={Math.abs(x(band.to) - x(band.from))}
+            y={TOP_PX}
+            height={bottom - TOP_PX}
+            className="slice-band"
+          >
             <title>{band.name}</title>
           </rect>
         ))}
         {yTicks.map((tick) => (
           <g key={tick}>
-            <line x1={LEFT_PX} x2={right} y1={y(tick)} y2={y(tick)} className={tick === 0 ? 'zero-line' : 'grid-line'} />
+            <line
+              x1={LEFT_PX}
+              x2={right}
+              y1={y(tick)}
+              y2={y(tick)}
+              className={tick === 0 ? 'zero-line' : 'grid-line'}
+            />
             <text x={LEFT_PX - 8} y={y(tick) + 4} textAnchor="end" className="tick">
               {formatNumber(tick, { decimals: tickDecimals(logY ? [tick] : yTicks), signed: signedY })}
             </text>
@@ -77,12 +114,26 @@ export function LineChart({ series, label, logY, bands = [], xTicks, xDomain, xT
           <g key={one.name}>
             <path d={ribbonPath(one.points, x, y)} className="ribbon" style={{ fill: colours[at] }} />
             {one.marks ? (
-              one.points.filter((point) => !logY || point.y > 0).map((point, index) => <circle key={index} cx={x(point.x)} cy={y(point.y)} r={2.2} style={{ fill: colours[at] }} />)
+              one.points
+                .filter((point) => !logY || point.y > 0)
+                .map((point, index) => (
+                  <circle key={index} cx={x(point.x)} cy={y(point.y)} r={2.2} style={{ fill: colours[at] }} />
+                ))
             ) : (
-              <path d={linePath(one.points, x, y)} className="line" style={{ stroke: colours[at] }} strokeDasharray={one.dash} />
+              <path
+                d={linePath(one.points, x, y)}
+                className="line"
+                style={{ stroke: colours[at] }}
+                strokeDasharray={one.dash}
+              />
             )}
             {series.length > 1 && (
-              <text x={right + 6} y={labels[at]! + 4} className="line-label" style={{ fill: 'var(--slInk2)' }}>
+              <text
+                x={right + 6}
+                y={labels[at]! + 4}
+                className="line-label"
+                style={{ fill: 'var(--slInk2)' }}
+              >
                 {one.name}
               </text>
             )}

@@ -45,10 +45,23 @@ export function QuantileDots({ outcomes, low, median, high, limitWm2, heightPx =
   const words = `${outcomes.length} equally likely outcomes, ${below} below zero; median ${formatForcing(median)}, 5 to 95 % from ${formatForcing(low)} to ${formatForcing(high)} watts per square metre`;
   return (
     <div ref={ref}>
-      <svg width={width} height={heightPx} viewBox={`0 0 ${width} ${heightPx}`} role="img" aria-label={label ?? words}>
+      <svg
+        width={width}
+        height={heightPx}
+        viewBox={`0 0 ${width} ${heightPx}`}
+        role="img"
+        aria-label={label ?? words}
+      >
         <line x1={x(0)} x2={x(0)} y1={8} y2={base + 4} className="zero-line" />
         {dotPlaces(outcomes, x, base).map((dot, at) => (
-          <circle key={at} cx={dot.cx} cy={dot.cy} r={DOT_PX / 2 - 0.3} style={{ fill: forcingColour(dot.value, limitWm2, mode) }} className="qd-dot" />
+          <circle
+            key={at}
+            cx={dot.cx}
+            cy={dot.cy}
+            r={DOT_PX / 2 - 0.3}
+            style={{ fill: forcingColour(dot.value, limitWm2, mode) }}
+            className="qd-dot"
+          />
         ))}
         <line x1={PAD_PX} x2={width - PAD_PX} y1={base} y2={base} className="axis-line" />
         <line x1={x(low)} x2={x(high)} y1={base} y2={base} className="qd-range" />

@@ -4,7 +4,13 @@ import type { ReactNode } from 'react';
 import { toApiProblem } from '../api/api-problem';
 import './feedback.css';
 
-type Props = { error: unknown; kept?: string; retry?: () => void; actions?: ReactNode; fields?: readonly string[] };
+type Props = {
+  error: unknown;
+  kept?: string;
+  retry?: () => void;
+  actions?: ReactNode;
+  fields?: readonly string[];
+};
 
 /** What happened, what was kept, and a way on. Faults of `fields` are left out: they stand at their fields. */
 export function ErrorState({ error, kept, retry, actions, fields = [] }: Props) {

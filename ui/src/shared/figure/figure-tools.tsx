@@ -1,4 +1,12 @@
-import { Button, Menu, MenuItem, MenuList, MenuPopover, MenuTrigger, Tooltip } from '@fluentui/react-components';
+import {
+  Button,
+  Menu,
+  MenuItem,
+  MenuList,
+  MenuPopover,
+  MenuTrigger,
+  Tooltip,
+} from '@fluentui/react-components';
 import { ArrowDownload16Regular, Table16Regular } from '@fluentui/react-icons';
 import type { RefObject } from 'react';
 import { useSay } from '../feedback/toasts';
@@ -17,7 +25,14 @@ type Props<Row extends object> = {
 };
 
 /** "As table", copy, PNG, SVG and CSV of a figure. */
-export function FigureTools<Row extends object>({ title, table, asTable, setAsTable, body, picture }: Props<Row>) {
+export function FigureTools<Row extends object>({
+  title,
+  table,
+  asTable,
+  setAsTable,
+  body,
+  picture,
+}: Props<Row>) {
   const say = useSay();
   const draw = picture ?? ((kind: 'png' | 'svg') => pictureOf(body.current, kind));
   const save = (kind: 'png' | 'svg') =>
@@ -34,17 +49,43 @@ export function FigureTools<Row extends object>({ title, table, asTable, setAsTa
     <span className="figure-tools sl-noprint">
       {table && (
         <Tooltip content={asTable ? 'As figure' : 'As table'} relationship="label">
-          <Button size="small" appearance="subtle" aria-label={`${title} as ${asTable ? 'figure' : 'table'}`} aria-pressed={asTable} icon={<Table16Regular />} onClick={() => setAsTable(!asTable)} />
+          <Button
+            size="small"
+            appearance="subtle"
+            aria-label={`${title} as ${asTable ? 'figure' : 'table'}`}
+            aria-pressed={asTable}
+            icon={<Table16Regular />}
+            onClick={() => setAsTable(!asTable)}
+          />
         </Tooltip>
       )}
       <Menu>
         <MenuTrigger disableButtonEnhancement>
-          <Button size="small" appearance="subtle" aria-label={`Save ${title}`} icon={<ArrowDownload16Regular />} />
+          <Button
+            size="small"
+            appearance="subtle"
+            aria-label={`Save ${title}`}
+            icon={<ArrowDownload16Regular />}
+          />
         </MenuTrigger>
         <MenuPopover>
           <MenuList>
-            {table && <MenuItem onClick={() => void copy().catch(() => say('The browser refused to copy', undefined, 'warning'))}>Copy the data</MenuItem>}
-            {table && <MenuItem onClick={() => download(fileNameOf(title, 'csv'), tableText(table.columns, table.rows, ','))}>CSV</MenuItem>}
+            {table && (
+              <MenuItem
+                onClick={() =>
+                  void copy().catch(() => say('The browser refused to copy', undefined, 'warning'))
+                }
+              >
+                Copy the data
+              </MenuItem>
+            )}
+            {table && (
+              <MenuItem
+                onClick={() => download(fileNameOf(title, 'csv'), tableText(table.columns, table.rows, ','))}
+              >
+                CSV
+              </MenuItem>
+            )}
             {!asTable && <MenuItem onClick={() => void save('png')}>PNG</MenuItem>}
             {!asTable && <MenuItem onClick={() => void save('svg')}>SVG</MenuItem>}
           </MenuList>

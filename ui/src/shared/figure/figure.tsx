@@ -35,7 +35,11 @@ export function Figure<Row extends object>(props: Props<Row>) {
   const body = useRef<HTMLDivElement>(null);
   const summaryId = useId();
   return (
-    <figure className={className ? `figure ${className}` : 'figure'} aria-label={title} aria-describedby={summary ? summaryId : undefined}>
+    <figure
+      className={className ? `figure ${className}` : 'figure'}
+      aria-label={title}
+      aria-describedby={summary ? summaryId : undefined}
+    >
       <header>
         <h3>{title}</h3>
         {sub && <span className="figure-sub">{sub}</span>}
@@ -50,7 +54,13 @@ export function Figure<Row extends object>(props: Props<Row>) {
       )}
       <div ref={body}>
         {asTable && table ? (
-          <DataTable bare caption={title} heightPx={380} empty={<p className="sl-muted">No data.</p>} {...table} />
+          <DataTable
+            bare
+            caption={title}
+            heightPx={380}
+            empty={<p className="sl-muted">No data.</p>}
+            {...table}
+          />
         ) : (
           children
         )}

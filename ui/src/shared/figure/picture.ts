@@ -1,13 +1,26 @@
 const PICTURE_SCALE = 2; // pixels per px: sharp in print at the usual sizes
 
-const styled = ['fill', 'fill-opacity', 'stroke', 'stroke-width', 'stroke-dasharray', 'stroke-opacity', 'opacity', 'font', 'text-anchor', 'color'];
+const styled = [
+  'fill',
+  'fill-opacity',
+  'stroke',
+  'stroke-width',
+  'stroke-dasharray',
+  'stroke-opacity',
+  'opacity',
+  'font',
+  'text-anchor',
+  'color',
+];
 
 /** The first drawing inside an element as a file; styles from the sheet are written into it. */
 export async function pictureOf(body: HTMLElement | null, kind: 'png' | 'svg'): Promise<Blob> {
   const drawing = body?.querySelector<SVGSVGElement>('svg[role="img"]');
   if (!drawing) throw new Error('This figure holds no drawing; save its data instead.');
   const text = standalone(drawing);
-  return kind === 'svg' ? new Blob([text], { type: 'image/svg+xml' }) : rasterise(text, drawing.clientWidth, drawing.clientHeight);
+  return kind === 'svg'
+    ? new Blob([text], { type: 'image/svg+xml' })
+    : rasterise(text, drawing.clientWidth, drawing.clientHeight);
 }
 
 function standalone(drawing: SVGSVGElement): string {
@@ -20,7 +33,9 @@ function standalone(drawing: SVGSVGElement): string {
     to[at]!.removeAttribute('class');
   });
   copy.setAttribute('xmlns', 'http://www.w3.org/2000/svg');
-  copy.style.background = getComputedStyle(document.querySelector('.sl-root') ?? document.body).backgroundColor;
+  copy.style.background = getComputedStyle(
+    document.querySelector('.sl-root') ?? document.body,
+  ).backgroundColor;
   return new XMLSerializer().serializeToString(copy);
 }
 
@@ -43,5 +58,8 @@ export async function rasterise(svg: string, widthPx: number, heightPx: number):
 
 export const blobOf = (canvas: HTMLCanvasElement) =>
   new Promise<Blob>((resolve, reject) =>
-    canvas.toBlob((blob) => (blob ? resolve(blob) : reject(new Error('The browser made no picture.'))), 'image/png'),
+    canvas.toBlob(
+      (blob) => (blob ? resolve(blob) : reject(new Error('The browser made no picture.'))),
+      'image/png',
+    ),
   );

@@ -3,7 +3,13 @@ import { useBlocker } from 'react-router-dom';
 import { ConfirmDialog } from '../feedback/confirm-dialog';
 
 /** Warns before unsaved input is left, by navigation inside the client or by closing the window. */
-export function LeaveGuard({ when, what = 'What you entered here is not saved yet.' }: { when: boolean; what?: string }) {
+export function LeaveGuard({
+  when,
+  what = 'What you entered here is not saved yet.',
+}: {
+  when: boolean;
+  what?: string;
+}) {
   const blocker = useBlocker(
     ({ currentLocation, nextLocation }) => when && currentLocation.pathname !== nextLocation.pathname,
   );

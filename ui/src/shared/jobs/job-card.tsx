@@ -25,7 +25,12 @@ export function JobCard({ job, hint }: { job: JobSummary; hint?: string }) {
         <StateTag state={job.state} />
         <span className="sl-grow" />
         {!isOver(job) && (
-          <Button size="small" icon={<Dismiss16Regular />} disabled={cancel.isPending} onClick={() => cancel.mutate()}>
+          <Button
+            size="small"
+            icon={<Dismiss16Regular />}
+            disabled={cancel.isPending}
+            onClick={() => cancel.mutate()}
+          >
             Cancel
           </Button>
         )}

@@ -9,7 +9,10 @@ const POLL_MS = 1500;
 /** Own jobs in progress, asked for often while there are any and now and then when there are none. */
 export const activeJobsQuery = queryOptions({
   queryKey: ['jobs', 'active'],
-  queryFn: () => listOf(api.get<JobSummary[] | { items: JobSummary[] }>('/jobs', { params: { active: 1 } })),
+  queryFn: async () => {
+    const jobs = await listOf(api.get<Listed<JobSummary>>('/jobs', { params: { active: 1, limit: 50 } }));
+    return jobs.filter((job) => !isOver(job));
+  },
   refetchInterval: (query) => ((query.state.data?.length ?? 0) > 0 ? POLL_MS : 15_000),
   staleTime: 0,
 });
@@ -26,7 +29,9 @@ export const jobQuery = (id: string) =>
 export const cancelJob = (id: string) => api.post<JobSummary>(`/jobs/${id}/cancel`);
 
 /** Lists come either bare or as a page with a cursor. */
-export async function listOf<T>(answer: Promise<T[] | { items: T[] }>): Promise<T[]> {
+export type Listed<T> = T[] | { items: T[] };
+
+export async function listOf<T>(answer: Promise<Listed<T>>): Promise<T[]> {
   const list = await answer;
   return Array.isArray(list) ? list : list.items;
 }

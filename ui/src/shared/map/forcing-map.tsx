@@ -23,7 +23,19 @@ const noSites: NonNullable<MapData['sites']> = [];
 /** World map of a quantity by region or on a grid, in step with a table through `selected` and `hovered`. */
 export function ForcingMap(props: Props) {
   const { label, unit, hatchMeans, onSelect, onHover } = props;
-  const { regions, values, field, ramp = 'forcing', limit, floor, hatched, sites, selected, hovered, projection } = props;
+  const {
+    regions,
+    values,
+    field,
+    ramp = 'forcing',
+    limit,
+    floor,
+    hatched,
+    sites,
+    selected,
+    hovered,
+    projection,
+  } = props;
   const { mode } = useColourMode();
   const [showHatch, setShowHatch] = useState(true);
   const [showSites, setShowSites] = useState(true);
@@ -33,7 +45,21 @@ export function ForcingMap(props: Props) {
       hatched: showHatch ? hatched : noHatch,
       sites: showSites ? sites : noSites,
     }),
-    [regions, values, field, ramp, limit, floor, selected, hovered, projection, hatched, sites, showHatch, showSites],
+    [
+      regions,
+      values,
+      field,
+      ramp,
+      limit,
+      floor,
+      selected,
+      hovered,
+      projection,
+      hatched,
+      sites,
+      showHatch,
+      showSites,
+    ],
   );
   const named = regions.find((region) => region.code === (hovered ?? selected));
   const value = named && values?.[named.code];
@@ -48,13 +74,18 @@ export function ForcingMap(props: Props) {
         <MapLegend
           {...{ ramp, limit, showHatch, showSites }}
           floor={floor ?? limit / 1000}
-          hatchMeans={hatched && hatched.size > 0 ? (hatchMeans ?? 'fewer than 3 sites, or interval includes zero') : undefined}
+          hatchMeans={
+            hatched && hatched.size > 0
+              ? (hatchMeans ?? 'fewer than 3 sites, or interval includes zero')
+              : undefined
+          }
           onHatch={setShowHatch}
           hasSites={Boolean(sites?.length)}
           onSites={setShowSites}
         />
         <span className="map-named">
-          {named && `${named.name}${typeof value === 'number' ? `: ${formatNumber(value, { figures: 3, signed: ramp === 'forcing' })} ${unit ?? ''}` : ''}`}
+          {named &&
+            `${named.name}${typeof value === 'number' ? `: ${formatNumber(value, { figures: 3, signed: ramp === 'forcing' })} ${unit ?? ''}` : ''}`}
         </span>
       </div>
     </div>

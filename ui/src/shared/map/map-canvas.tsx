@@ -27,8 +27,14 @@ export default function MapCanvas({ data, mode, onSelect, onHover }: Props) {
     () => field && paintRaster(field, projection, colouringOf({ regions: [], ramp, limit, floor }, mode)),
     [field, projection, ramp, limit, floor, mode],
   );
-  const parts = useMemo(() => partsOf({ regions, limit: 1, selected, hovered }), [regions, selected, hovered]);
-  const option = useMemo(() => mapOption(data, parts, picture, mode, widthPx), [data, parts, picture, mode, widthPx]);
+  const parts = useMemo(
+    () => partsOf({ regions, limit: 1, selected, hovered }),
+    [regions, selected, hovered],
+  );
+  const option = useMemo(
+    () => mapOption(data, parts, picture, mode, widthPx),
+    [data, parts, picture, mode, widthPx],
+  );
 
   // One handler object for ever: a new one restarts the chart. What it calls is kept current beside it.
   const current = useRef({ parts, onSelect, onHover });

@@ -2,7 +2,11 @@ import type { RampName } from '../theme/ramps';
 import type { ProjectionName } from './projections';
 import type { RasterField } from './raster';
 
-export type MapRegion = { code: string; name: string; parts: readonly (readonly (readonly [number, number])[])[] };
+export type MapRegion = {
+  code: string;
+  name: string;
+  parts: readonly (readonly (readonly [number, number])[])[];
+};
 export type MapSite = { longitudeDeg: number; latitudeDeg: number; sampleCount: number; name?: string };
 
 /** What a map shows; picked and pointed-at regions are shared with the table beside it. */

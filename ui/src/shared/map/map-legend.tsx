@@ -24,7 +24,11 @@ export function MapLegend(props: Props) {
   const { ramp, limit, floor } = props;
   return (
     <>
-      <div className="map-bar" role="img" aria-label={`Colours from ${tickTexts(ramp, limit, floor).join(' to ')}`}>
+      <div
+        className="map-bar"
+        role="img"
+        aria-label={`Colours from ${tickTexts(ramp, limit, floor).join(' to ')}`}
+      >
         <div style={{ background: gradient(ramps[ramp][mode]) }} />
         <div>
           {tickTexts(ramp, limit, floor).map((text) => (
@@ -33,13 +37,23 @@ export function MapLegend(props: Props) {
         </div>
       </div>
       {props.hatchMeans && (
-        <button type="button" className="map-key" aria-pressed={props.showHatch} onClick={() => props.onHatch(!props.showHatch)}>
+        <button
+          type="button"
+          className="map-key"
+          aria-pressed={props.showHatch}
+          onClick={() => props.onHatch(!props.showHatch)}
+        >
           <i className="map-hatch" />
           {props.hatchMeans}
         </button>
       )}
       {props.hasSites && (
-        <button type="button" className="map-key" aria-pressed={props.showSites} onClick={() => props.onSites(!props.showSites)}>
+        <button
+          type="button"
+          className="map-key"
+          aria-pressed={props.showSites}
+          onClick={() => props.onSites(!props.showSites)}
+        >
           <span className="map-dots">
             {siteSteps.map((count) => (
               <i key={count} style={{ width: siteDiameterPx(count), height: siteDiameterPx(count) }} />
@@ -54,7 +68,9 @@ export function MapLegend(props: Props) {
 
 function tickTexts(ramp: RampName, limit: number, floor: number): string[] {
   if (ramp === 'forcing') {
-    return [-1, -0.5, 0, 0.5, 1].map((share) => (share === 0 ? '0' : formatNumber(share * limit, { decimals: decimalsOf(limit / 2), signed: true })));
+    return [-1, -0.5, 0, 0.5, 1].map((share) =>
+      share === 0 ? '0' : formatNumber(share * limit, { decimals: decimalsOf(limit / 2), signed: true }),
+    );
   }
   const middle = Math.sqrt(limit * floor);
   return [floor, middle, limit].map((value) => formatNumber(value, { figures: 1 }));

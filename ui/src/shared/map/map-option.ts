@@ -69,7 +69,11 @@ function geoLayer(data: MapData, overPicture: boolean, mode: ColourMode) {
     regions: [
       {
         name: 'land',
-        itemStyle: { areaColor: overPicture || data.values ? 'transparent' : land, borderColor: coast, borderWidth: 0.75 },
+        itemStyle: {
+          areaColor: overPicture || data.values ? 'transparent' : land,
+          borderColor: coast,
+          borderWidth: 0.75,
+        },
       },
       { name: 'sphere', itemStyle: { borderColor: light ? '#6E7A84' : '#5B6B77', borderWidth: 1 } },
     ],
@@ -114,8 +118,11 @@ function regionLayer(data: MapData, parts: readonly Part[], overPicture: boolean
       const over = region.code === data.hovered;
       const stroke = on || over ? ink : inkAt(mode, 0.4, 0.34);
       const lineWidth = on ? 2.2 : over ? 1.4 : 0.7;
-      const children: unknown[] = [{ type: 'polygon', shape: { points }, style: { fill: fillOf(region.code), stroke, lineWidth } }];
-      if (data.hatched?.has(region.code)) children.push({ type: 'polygon', shape: { points }, style: { fill: hatch }, silent: true });
+      const children: unknown[] = [
+        { type: 'polygon', shape: { points }, style: { fill: fillOf(region.code), stroke, lineWidth } },
+      ];
+      if (data.hatched?.has(region.code))
+        children.push({ type: 'polygon', shape: { points }, style: { fill: hatch }, silent: true });
       return { type: 'group', children };
     },
   };

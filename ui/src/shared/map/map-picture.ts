@@ -15,7 +15,10 @@ export async function drawMap(kind: 'png' | 'svg', data: MapData): Promise<Blob>
   const picture = data.field && paintRaster(data.field, projection, colouringOf(data, 'light'));
   const chart = echarts.init(null, null, { renderer: 'svg', ssr: true, width: WIDTH_PX, height });
   try {
-    chart.setOption({ ...mapOption(data, partsOf(data), picture, 'light', WIDTH_PX), backgroundColor: PAPER });
+    chart.setOption({
+      ...mapOption(data, partsOf(data), picture, 'light', WIDTH_PX),
+      backgroundColor: PAPER,
+    });
     const svg = chart.renderToSVGString();
     if (kind === 'svg') return new Blob([svg], { type: 'image/svg+xml' });
     return await rasteriseMap(svg, WIDTH_PX, height);

@@ -45,7 +45,11 @@ function invertProjection(name: ProjectionName, stepDeg: number): Int32Array {
 export type Colouring = { ramp: RampName; limit: number; floor: number; mode: ColourMode };
 
 /** The field as a picture in the projection, painted once for each field and colouring. */
-export function paintRaster(field: RasterField, name: ProjectionName, colouring: Colouring): HTMLCanvasElement {
+export function paintRaster(
+  field: RasterField,
+  name: ProjectionName,
+  colouring: Colouring,
+): HTMLCanvasElement {
   const canvas = document.createElement('canvas');
   canvas.width = RASTER_WIDTH_PX;
   canvas.height = Math.round(RASTER_WIDTH_PX * aspectOf[name]);

@@ -54,10 +54,28 @@ export function worldShapes(): GeoJSON {
   return {
     type: 'FeatureCollection',
     features: [
-      { type: 'Feature', properties: { name: 'sphere' }, geometry: { type: 'Polygon', coordinates: [sphereRing()] } },
-      ...span(-120, 120, 4).map((lon, at) => line(span(-90, 90).map((lat): Point => [lon, lat]), `meridian ${at}`)),
-      ...span(-60, 60, 4).map((lat, at) => line(span(-180, 180).map((lon): Point => [lon, lat]), `parallel ${at}`)),
-      { type: 'Feature', properties: { name: 'land' }, geometry: { type: 'MultiPolygon', coordinates: landRings() } },
+      {
+        type: 'Feature',
+        properties: { name: 'sphere' },
+        geometry: { type: 'Polygon', coordinates: [sphereRing()] },
+      },
+      ...span(-120, 120, 4).map((lon, at) =>
+        line(
+          span(-90, 90).map((lat): Point => [lon, lat]),
+          `meridian ${at}`,
+        ),
+      ),
+      ...span(-60, 60, 4).map((lat, at) =>
+        line(
+          span(-180, 180).map((lon): Point => [lon, lat]),
+          `parallel ${at}`,
+        ),
+      ),
+      {
+        type: 'Feature',
+        properties: { name: 'land' },
+        geometry: { type: 'MultiPolygon', coordinates: landRings() },
+      },
     ],
   };
 }

@@ -12,7 +12,8 @@ export function formatNumber(value: number, { decimals, figures, signed = false 
 }
 
 /** A forcing [W m⁻²], always with its sign. */
-export const formatForcing = (netWm2: number, decimals = 2) => formatNumber(netWm2, { decimals, signed: true });
+export const formatForcing = (netWm2: number, decimals = 2) =>
+  formatNumber(netWm2, { decimals, signed: true });
 
 /** Decimals that keep a count of significant figures, 0 to 8. */
 export function decimalsForFigures(value: number, figures: number): number {
@@ -55,7 +56,8 @@ function decimalsShown(value: number): number {
   return text.includes('.') ? text.split('.')[1]!.length : 0;
 }
 
-export const formatAgeSpan = (youngKa: number, oldKa: number) => `${formatAge(oldKa)} to ${formatAge(youngKa)} ka`;
+export const formatAgeSpan = (youngKa: number, oldKa: number) =>
+  `${formatAge(oldKa)} to ${formatAge(youngKa)} ka`;
 
 export function formatBytes(bytes: number): string {
   if (bytes < 1000) return `${bytes} B`;
@@ -63,9 +65,11 @@ export function formatBytes(bytes: number): string {
   return `${formatNumber(bytes / 1000 ** step, { figures: 3 })} ${['B', 'kB', 'MB', 'GB'][step]}`;
 }
 
-export const formatPercent = (share01: number, decimals = 0) => `${formatNumber(share01 * 100, { decimals })} %`;
+export const formatPercent = (share01: number, decimals = 0) =>
+  `${formatNumber(share01 * 100, { decimals })} %`;
 
 /** "1 site", "3 sites". */
-export const counted = (count: number, one: string, many = `${one}s`) => `${count} ${count === 1 ? one : many}`;
+export const counted = (count: number, one: string, many = `${one}s`) =>
+  `${count} ${count === 1 ? one : many}`;
 
 const clamp = (value: number, low: number, high: number) => Math.min(high, Math.max(low, value));

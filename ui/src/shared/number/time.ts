@@ -3,7 +3,9 @@ const dateStyle: Intl.DateTimeFormatOptions = { day: 'numeric', month: 'short', 
 export const formatDate = (iso: string) => new Intl.DateTimeFormat('en-GB', dateStyle).format(new Date(iso));
 
 export const formatDateTime = (iso: string) =>
-  new Intl.DateTimeFormat('en-GB', { ...dateStyle, hour: '2-digit', minute: '2-digit' }).format(new Date(iso));
+  new Intl.DateTimeFormat('en-GB', { ...dateStyle, hour: '2-digit', minute: '2-digit' }).format(
+    new Date(iso),
+  );
 
 const steps: [limitSeconds: number, unitSeconds: number, name: string][] = [
   [90, 1, 's'],

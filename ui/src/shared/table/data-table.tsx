@@ -45,7 +45,10 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
     descending: props.startDescending ?? false,
     filter: '',
   });
-  const shown = useMemo(() => (narrow ? columns.filter((column) => !column.wideOnly) : columns), [columns, narrow]);
+  const shown = useMemo(
+    () => (narrow ? columns.filter((column) => !column.wideOnly) : columns),
+    [columns, narrow],
+  );
   const sorted = useDataTable(rows, columns, view);
   const all = props.pinned ? [...props.pinned, ...sorted] : sorted;
   return (
@@ -56,7 +59,13 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
           {sub && <span className="sl-small sl-muted">{sub}</span>}
           <span className="sl-grow" />
           {filterable && (
-            <SearchBox size="small" aria-label={`Filter ${caption}`} placeholder="Filter" value={view.filter} onChange={(_, data) => change({ ...view, filter: data.value })} />
+            <SearchBox
+              size="small"
+              aria-label={`Filter ${caption}`}
+              placeholder="Filter"
+              value={view.filter}
+              onChange={(_, data) => change({ ...view, filter: data.value })}
+            />
           )}
           {!bare && <TableTools title={caption} columns={columns} rows={all} />}
         </div>
@@ -64,14 +73,27 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
       {rows.length === 0 ? (
         empty
       ) : (
-        <div ref={scroller} className="data-table-scroll" style={heightPx ? { maxHeight: heightPx } : undefined} tabIndex={heightPx ? 0 : undefined} role={heightPx ? 'region' : undefined} aria-label={heightPx ? `${caption}, rows` : undefined}>
-          <table className={roomy ? 'sl-table roomy' : 'sl-table'} aria-label={caption} aria-rowcount={all.length + 1}>
+        <div
+          ref={scroller}
+          className="data-table-scroll"
+          style={heightPx ? { maxHeight: heightPx } : undefined}
+          tabIndex={heightPx ? 0 : undefined}
+          role={heightPx ? 'region' : undefined}
+          aria-label={heightPx ? `${caption}, rows` : undefined}
+        >
+          <table
+            className={roomy ? 'sl-table roomy' : 'sl-table'}
+            aria-label={caption}
+            aria-rowcount={all.length + 1}
+          >
             <TableHead columns={shown} view={view} onChange={change} />
             <TableBody {...props} columns={shown} all={all} scroller={scroller} />
           </table>
         </div>
       )}
-      {rows.length > 0 && sorted.length === 0 && <p className="data-table-foot">No row holds “{view.filter}”.</p>}
+      {rows.length > 0 && sorted.length === 0 && (
+        <p className="data-table-foot">No row holds “{view.filter}”.</p>
+      )}
       {foot && <p className="data-table-foot">{foot}</p>}
       <span className="sl-hidden" role="status">
         {view.filter && `${counted(sorted.length, 'row')} of ${rows.length}`}

@@ -64,7 +64,16 @@ const Gap = ({ heightPx, span }: { heightPx: number; span: number }) =>
     </tr>
   ) : null;
 
-function TableRow<Row extends object>({ row, index, columns, rowKey, pinned, selectedKey, onSelect, onHover }: Props<Row> & { row: Row; index: number }) {
+function TableRow<Row extends object>({
+  row,
+  index,
+  columns,
+  rowKey,
+  pinned,
+  selectedKey,
+  onSelect,
+  onHover,
+}: Props<Row> & { row: Row; index: number }) {
   const total = pinned?.includes(row);
   const pickable = onSelect && !total;
   const keys = (event: KeyboardEvent<HTMLTableRowElement>) => {

@@ -2,7 +2,11 @@ import { ArrowSortDown16Regular, ArrowSortUp16Regular } from '@fluentui/react-ic
 import type { DataColumn } from './column';
 import type { TableView } from './use-table-address';
 
-type Props<Row> = { columns: readonly DataColumn<Row>[]; view: TableView; onChange: (view: TableView) => void };
+type Props<Row> = {
+  columns: readonly DataColumn<Row>[];
+  view: TableView;
+  onChange: (view: TableView) => void;
+};
 
 /** First press sorts upwards, the second downwards, the third gives back the order of arrival. */
 function nextSort(view: TableView, id: string): TableView {
@@ -27,7 +31,12 @@ export function TableHead<Row>({ columns, view, onChange }: Props<Row>) {
               (column.heading ?? (column.header || <span className="sl-hidden">Acts</span>))
             ) : (
               <button type="button" onClick={() => onChange(nextSort(view, column.id))}>
-                {view.sort === column.id && (view.descending ? <ArrowSortDown16Regular aria-hidden /> : <ArrowSortUp16Regular aria-hidden />)}
+                {view.sort === column.id &&
+                  (view.descending ? (
+                    <ArrowSortDown16Regular aria-hidden />
+                  ) : (
+                    <ArrowSortUp16Regular aria-hidden />
+                  ))}
                 {column.heading ?? column.header}
               </button>
             )}

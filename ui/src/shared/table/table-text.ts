@@ -4,10 +4,18 @@ import type { CellValue, DataColumn } from './column';
  * A table as text for the clipboard (tabs) or a file (commas): plain ASCII minus, point as decimal sign,
  * full precision, units in the headings.
  */
-export function tableText<Row>(columns: readonly DataColumn<Row>[], rows: readonly Row[], separator: '\t' | ','): string {
+export function tableText<Row>(
+  columns: readonly DataColumn<Row>[],
+  rows: readonly Row[],
+  separator: '\t' | ',',
+): string {
   const written = columns.filter((column) => !column.screenOnly);
-  const heads = written.map((column) => quote(column.unit ? `${column.header} [${column.unit}]` : column.header, separator));
-  const lines = rows.map((row) => written.map((column) => cellText(column.value(row), separator)).join(separator));
+  const heads = written.map((column) =>
+    quote(column.unit ? `${column.header} [${column.unit}]` : column.header, separator),
+  );
+  const lines = rows.map((row) =>
+    written.map((column) => cellText(column.value(row), separator)).join(separator),
+  );
   return [heads.join(separator), ...lines].join('\r\n') + '\r\n';
 }
 

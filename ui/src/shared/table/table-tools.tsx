@@ -19,10 +19,22 @@ export function TableTools<Row>({ title, columns, rows }: Props<Row>) {
   return (
     <span className="figure-tools sl-noprint">
       <Tooltip content="Copy the table" relationship="label">
-        <Button size="small" appearance="subtle" aria-label={`Copy ${title}`} icon={<Copy16Regular />} onClick={() => void copy()} />
+        <Button
+          size="small"
+          appearance="subtle"
+          aria-label={`Copy ${title}`}
+          icon={<Copy16Regular />}
+          onClick={() => void copy()}
+        />
       </Tooltip>
       <Tooltip content="Download as CSV" relationship="label">
-        <Button size="small" appearance="subtle" aria-label={`Download ${title} as CSV`} icon={<ArrowDownload16Regular />} onClick={() => download(fileNameOf(title, 'csv'), tableText(columns, rows, ','))} />
+        <Button
+          size="small"
+          appearance="subtle"
+          aria-label={`Download ${title} as CSV`}
+          icon={<ArrowDownload16Regular />}
+          onClick={() => download(fileNameOf(title, 'csv'), tableText(columns, rows, ','))}
+        />
       </Tooltip>
     </span>
   );

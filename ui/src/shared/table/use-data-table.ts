@@ -30,7 +30,10 @@ const isAbsent = (value: CellValue) => value === null || value === undefined || 
 
 /** Whether a row holds every word of the filter in some column. */
 export function rowHolds<Row>(row: Row, columns: readonly DataColumn<Row>[], filter: string): boolean {
-  const text = columns.map((column) => String(column.value(row) ?? '')).join('\n').toLowerCase();
+  const text = columns
+    .map((column) => String(column.value(row) ?? ''))
+    .join('\n')
+    .toLowerCase();
   return filter
     .toLowerCase()
     .split(/\s+/)
@@ -38,7 +41,11 @@ export function rowHolds<Row>(row: Row, columns: readonly DataColumn<Row>[], fil
 }
 
 /** Rows of a table after its filter and sorting. */
-export function useDataTable<Row extends object>(rows: readonly Row[], columns: readonly DataColumn<Row>[], view: TableView): Row[] {
+export function useDataTable<Row extends object>(
+  rows: readonly Row[],
+  columns: readonly DataColumn<Row>[],
+  view: TableView,
+): Row[] {
   const definitions = useMemo<ColumnDef<typeof features, Row>[]>(
     () =>
       columns.map((column) => ({
@@ -46,7 +53,8 @@ export function useDataTable<Row extends object>(rows: readonly Row[], columns: 
         header: column.header,
         accessorFn: (row: Row) => (isAbsent(column.value(row)) ? undefined : column.value(row)),
         sortUndefined: 'last' as const,
-        sortFn: (a: { original: Row }, b: { original: Row }) => compareCells(column.value(a.original), column.value(b.original)),
+        sortFn: (a: { original: Row }, b: { original: Row }) =>
+          compareCells(column.value(a.original), column.value(b.original)),
       })),
     [columns],
   );
@@ -64,7 +72,8 @@ export function useDataTable<Row extends object>(rows: readonly Row[], columns: 
     columns: definitions,
     state,
     getColumnCanGlobalFilter: () => true,
-    globalFilterFn: (row: { original: Row }, _id: string, filter: string) => rowHolds(row.original, columns, filter),
+    globalFilterFn: (row: { original: Row }, _id: string, filter: string) =>
+      rowHolds(row.original, columns, filter),
   });
   return table.getRowModel().rows.map((row) => row.original);
 }

@@ -14,7 +14,8 @@ export function useTableView(prefix: string | undefined, start: TableView) {
   const change = useCallback(
     (next: TableView) => {
       if (prefix === undefined) setLocal(next);
-      else setParams((before) => intoAddress(before, prefix, next), { replace: true, preventScrollReset: true });
+      else
+        setParams((before) => intoAddress(before, prefix, next), { replace: true, preventScrollReset: true });
     },
     [prefix, setParams],
   );

@@ -6,7 +6,11 @@ const storageKey = 'siltlight-theme';
 const prefersDark = '(prefers-color-scheme: dark)';
 
 type ColourModeState = { mode: ColourMode; choice: ThemeChoice; choose: (choice: ThemeChoice) => void };
-const ColourModeContext = createContext<ColourModeState>({ mode: 'light', choice: 'system', choose: () => undefined });
+const ColourModeContext = createContext<ColourModeState>({
+  mode: 'light',
+  choice: 'system',
+  choose: () => undefined,
+});
 
 export const useColourMode = () => useContext(ColourModeContext);
 
@@ -20,7 +24,13 @@ export function ColourModeProvider({ children }: { children: ReactNode }) {
   const [choice, setChoice] = useState<ThemeChoice>(remembered);
   const systemIsDark = useMedia(prefersDark);
   const printing = useMedia('print');
-  const mode: ColourMode = printing ? 'light' : choice === 'system' ? (systemIsDark ? 'dark' : 'light') : choice;
+  const mode: ColourMode = printing
+    ? 'light'
+    : choice === 'system'
+      ? systemIsDark
+        ? 'dark'
+        : 'light'
+      : choice;
 
   useEffect(() => {
     document.documentElement.style.colorScheme = mode;

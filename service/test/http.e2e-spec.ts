@@ -17,7 +17,10 @@ const sendRaw = (text: string, type = 'application/json') =>
 
 describe('a problem', () => {
   test('is problem+json with the request id that the log line carries, too', async () => {
-    const answer = await service.http.get('/api/v1/nothing/here?token=secret').set('X-Request-Id', 'a-well-formed-id').expect(404);
+    const answer = await service.http
+      .get('/api/v1/nothing/here?token=secret')
+      .set('X-Request-Id', 'a-well-formed-id')
+      .expect(404);
     expect(answer.headers['content-type']).toMatch(/^application\/problem\+json/);
     expect(answer.headers['x-request-id']).toBe('a-well-formed-id');
     expect(answer.body).toMatchObject({
@@ -28,12 +31,20 @@ describe('a problem', () => {
       requestId: 'a-well-formed-id',
     });
     const line = service.logged.find((entry) => entry.requestId === 'a-well-formed-id');
-    expect(line).toMatchObject({ event: 'request', method: 'GET', path: '/api/v1/nothing/here', status: 404 });
+    expect(line).toMatchObject({
+      event: 'request',
+      method: 'GET',
+      path: '/api/v1/nothing/here',
+      status: 404,
+    });
     expect(JSON.stringify(service.logged)).not.toContain('token=secret');
   });
 
   test('does not take over a request id that is not well-formed', async () => {
-    const answer = await service.http.get('/api/health/live').set('X-Request-Id', 'no good; drop').expect(200);
+    const answer = await service.http
+      .get('/api/health/live')
+      .set('X-Request-Id', 'no good; drop')
+      .expect(200);
     expect(answer.headers['x-request-id']).toMatch(/^[0-9a-f-]{36}$/);
   });
 
@@ -48,7 +59,10 @@ describe('a problem', () => {
   test('names every wrong field of a body', async () => {
     const answer = await service.stranger().post(SIGN_IN).send({ email: 7 }).expect(422);
     expect(answer.body.code).toBe('invalid-input');
-    expect(answer.body.errors.map((error: { pointer: string }) => error.pointer)).toEqual(['/email', '/password']);
+    expect(answer.body.errors.map((error: { pointer: string }) => error.pointer)).toEqual([
+      '/email',
+      '/password',
+    ]);
   });
 
   test('of a query parameter names the parameter, its value and the limit', async () => {
@@ -71,7 +85,13 @@ describe('a body', () => {
   test('that is not JSON, or compressed, is refused with 415', async () => {
     await sendRaw('email=a', 'application/x-www-form-urlencoded').expect(415);
     await sendRaw('<a/>', 'text/xml').expect(415);
-    await service.stranger().post(SIGN_IN).type('json').set('Content-Encoding', 'gzip').send('{}').expect(415);
+    await service
+      .stranger()
+      .post(SIGN_IN)
+      .type('json')
+      .set('Content-Encoding', 'gzip')
+      .send('{}')
+      .expect(415);
   });
 
   test('over 2 MiB is refused with 413 and the limit', async () => {
@@ -89,7 +109,12 @@ describe('every answer', () => {
   test('carries the security headers and no trace of the framework', async () => {
     const { headers } = await service.http.get('/api/health/live').expect(200);
     expect(headers['content-security-policy']).toContain("default-src 'self'");
-    for (const directive of ["object-src 'none'", "base-uri 'none'", "frame-ancestors 'none'", "script-src 'self';"]) {
+    for (const directive of [
+      "object-src 'none'",
+      "base-uri 'none'",
+      "frame-ancestors 'none'",
+      "script-src 'self';",
+    ]) {
       expect(headers['content-security-policy']).toContain(directive);
     }
     expect(headers).toMatchObject({
@@ -111,7 +136,10 @@ describe('the client', () => {
     uiDir = await fs.mkdtemp(path.join(service.settings.dataDir, 'ui-'));
     await fs.mkdir(path.join(uiDir, 'assets'));
     await fs.mkdir(path.join(uiDir, '.vite'));
-    await fs.writeFile(path.join(uiDir, 'index.html'), '<!doctype html><html><head></head><body></body></html>');
+    await fs.writeFile(
+      path.join(uiDir, 'index.html'),
+      '<!doctype html><html><head></head><body></body></html>',
+    );
     await fs.writeFile(path.join(uiDir, 'assets', 'main-abc123.js'), 'void 0;');
     await fs.writeFile(path.join(uiDir, '.vite', 'manifest.json'), '{}');
     client = await testApp({ settings: { uiDir } });
@@ -119,7 +147,10 @@ describe('the client', () => {
   afterAll(() => client.close());
 
   test('is served for every address of its own, with a fresh style nonce that its policy names', async () => {
-    const [first, second] = [await client.http.get('/estimates/new').expect(200), await client.http.get('/').expect(200)];
+    const [first, second] = [
+      await client.http.get('/estimates/new').expect(200),
+      await client.http.get('/').expect(200),
+    ];
     const nonceOf = (text: string) => /<meta property="csp-nonce" nonce="([^"]+)" \/>/.exec(text)?.[1];
     const nonce = nonceOf(first.text)!;
     expect(first.headers['content-security-policy']).toContain(`style-src 'self' 'nonce-${nonce}'`);
@@ -132,11 +163,14 @@ describe('the client', () => {
     expect(answer.headers['cache-control']).toBe('public, max-age=31536000, immutable');
   });
 
-  test.each(['/assets/gone.js', '/favicon.gone', '/.vite/manifest.json', '/assets/../../siltlight.sqlite', '/api/gone'])(
-    'answers 404, not its page, for %s',
-    async (address) => {
-      const answer = await client.http.get(address).expect(404);
-      expect(answer.headers['content-type']).toMatch(/^application\/problem\+json/);
-    },
-  );
+  test.each([
+    '/assets/gone.js',
+    '/favicon.gone',
+    '/.vite/manifest.json',
+    '/assets/../../siltlight.sqlite',
+    '/api/gone',
+  ])('answers 404, not its page, for %s', async (address) => {
+    const answer = await client.http.get(address).expect(404);
+    expect(answer.headers['content-type']).toMatch(/^application\/problem\+json/);
+  });
 });

@@ -97,18 +97,8 @@ export function noSuchRoute(): Problem {
 }
 
 function fromDatabase(error: BaseError): Problem | undefined {
-  if (error instanceof UniqueConstraintError) {
-    const errors = error.errors.map(({ path, message }) => ({
-      pointer: path ? `/${path}` : '',
-      ...(path ? { field: path } : {}),
-      message,
-    }));
-    return new Problem(409, 'duplicate', 'This exists already', {
-      detail: `Another entry has the same ${Object.keys(error.fields).join(', ') || 'key'}.`,
-      errors,
-    });
-  }
   const cause = String((error as { original?: Error }).original?.message ?? error.message);
+  if (error instanceof UniqueConstraintError) return fromConstraint(error, cause);
   if (cause.includes('SQLITE_FULL')) {
     return new Problem(507, 'storage-full', 'The storage is full', {
       detail: 'Nothing was changed. Reading goes on; an administrator has to make room.',
@@ -121,6 +111,22 @@ function fromDatabase(error: BaseError): Problem | undefined {
     });
   }
   return undefined;
+}
+
+/** Sequelize calls every constraint of SQLite a unique one; only the driver's own words tell them apart. */
+function fromConstraint(error: UniqueConstraintError, cause: string): Problem | undefined {
+  if (cause.includes('UNIQUE constraint failed')) {
+    const fields = Object.keys(error.fields);
+    return new Problem(409, 'duplicate', 'This exists already', {
+      detail: `Another entry has the same ${fields.join(', ') || 'key'}.`,
+      errors: fields.map((field) => ({ pointer: `/${field}`, field, message: 'It is taken already.' })),
+    });
+  }
+  // CHECK, NOT NULL and foreign keys are broken by our own mistakes; the rest are the triggers' own sentences.
+  if (/(CHECK|NOT NULL|FOREIGN KEY) constraint failed/.test(cause)) return undefined;
+  return new Problem(409, 'not-changeable', 'This cannot be changed any more', {
+    detail: `${cause.replace(/^SQLITE_CONSTRAINT: /, '')}.`,
+  });
 }
 
 /** What Express and its parsers raise: they carry a status and say with `expose` that it may be shown. */

@@ -12,7 +12,9 @@ function refusalOf(text: string): Problem {
 }
 
 test('every JSON value that can be kept exactly is read as JSON.parse reads it', () => {
-  const key = fc.string().filter((name) => !['__proto__', 'constructor', 'prototype'].includes(name) && !name.includes('\0'));
+  const key = fc
+    .string()
+    .filter((name) => !['__proto__', 'constructor', 'prototype'].includes(name) && !name.includes('\0'));
   const text = fc.string({ unit: 'grapheme' }).filter((value) => !value.includes('\0'));
   const { tree } = fc.letrec((tie) => ({
     tree: fc.oneof(

@@ -15,7 +15,15 @@ test('the worked examples of RFC 8785 come out as printed there', () => {
 });
 
 test('members are sorted by UTF-16 code units, so that an emoji comes before a Hebrew presentation form', () => {
-  const sorted = canonicalJson({ '\u20ac': 1, '\r': 2, '\ufb33': 3, '1': 4, '\ud83d\ude00': 5, '\u0080': 6, '\u00f6': 7 });
+  const sorted = canonicalJson({
+    '\u20ac': 1,
+    '\r': 2,
+    '\ufb33': 3,
+    '1': 4,
+    '\ud83d\ude00': 5,
+    '\u0080': 6,
+    '\u00f6': 7,
+  });
   expect(Object.values(JSON.parse(sorted) as object)).toEqual([4, 2, 6, 7, 1, 5, 3]);
 });
 
@@ -23,6 +31,12 @@ test('the order in which members were set does not change the checksum, and any 
   expect(checksumOf({ a: 1, b: { d: 1, c: 2 } })).toBe(checksumOf({ b: { c: 2, d: 1 }, a: 1 }));
   expect(checksumOf({ a: 1 })).not.toBe(checksumOf({ a: 1.0000000000000002 }));
   expect(checksumOf({ a: 1, b: undefined })).toBe(checksumOf({ a: 1 }));
+});
+
+// The example of reference/decisions/0010-canonical-form-and-checksum.md; its sum was taken with Python's hashlib.
+test('the example of the written description has the checksum stated there', () => {
+  const content = { unit: 'g m-2 yr-1', flux: [0.1, 1e21, -0, 1.5], site: 'Dôme C\n', note: null };
+  expect(checksumOf(content)).toBe('1ae483a0899506680890aa7a94ee9dcc0537a5785898623c7092146bb677f37e');
 });
 
 test('what is read back from the canonical form has the same canonical form', () => {

@@ -2,6 +2,18 @@ import { Op, type Transaction } from 'sequelize';
 import type { ObjectRow } from './models/object-row';
 
 const MAX_LENGTH = 60;
+/** Letters of authors and places that Unicode does not take apart. */
+const PLAIN: Record<string, string> = {
+  ß: 'ss',
+  æ: 'ae',
+  œ: 'oe',
+  ø: 'o',
+  ł: 'l',
+  đ: 'd',
+  ð: 'd',
+  þ: 'th',
+  ı: 'i',
+};
 
 /** A readable name for addresses and file names: lower-case ASCII words with hyphens between. */
 export function slugOf(title: string): string {
@@ -9,6 +21,7 @@ export function slugOf(title: string): string {
     .normalize('NFKD')
     .replace(/\p{M}/gu, '')
     .toLowerCase()
+    .replace(/[ßæœøłđðþı]/g, (letter) => PLAIN[letter] ?? letter)
     .replace(/[^a-z0-9]+/g, '-')
     .slice(0, MAX_LENGTH)
     .replace(/^-+|-+$/g, '');

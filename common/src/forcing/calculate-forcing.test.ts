@@ -32,7 +32,7 @@ test('a clear-sky efficiency counts in the clear part of the sky, longwave in th
   const answer = calculateForcing(request);
   expect(answer.shortwaveWm2).toBeCloseTo(-1.2, 12);
   expect(answer.longwaveWm2).toBeCloseTo(0.8, 12);
-  expect(() => calculateForcing({ ...request, cloudFraction: undefined } as ForcingRequest)).toThrow(
+  expect(() => calculateForcing({ ...request, cloudFraction: undefined })).toThrow(
     /cloudFraction is missing/,
   );
   expect(() => calculateForcing({ ...request, efficiencySky: 'all' })).toThrow(

@@ -11,7 +11,7 @@ export const MONTH_DAYS: readonly number[] = [31, 28, 31, 30, 31, 30, 31, 31, 30
 
 /**
  * First longitude of the January arc [°]. 1 January is at 279.6° in 1950 CE, so arcs of 30° from 280° differ from the
- * present calendar months by less than two days in length and 2.5° in their beginning. Own choice.
+ * present calendar months by less than two days in length and 3° in their beginning. Own choice.
  */
 const JANUARY_START_DEG = 280;
 

@@ -90,7 +90,7 @@ function missing(field: string, unit: string, allowed: [number, number] | readon
       : `one of ${allowed.join(', ')}`;
   return new DomainError(
     'missing',
-    { field, value: undefined, unit, allowed: [...allowed] as [number, number] | string[] },
+    { field, value: undefined, unit, allowed: [...allowed] },
     `${field} is missing; it must be ${range}${unit ? ` ${unit}` : ''}.`,
   );
 }

@@ -22,6 +22,10 @@ export interface ColumnProposal {
   /** 0 to 1 */
   confidence: number;
   reason: string;
+  /** of a flux: dust, or the tracer; told from the heading where it is absent */
+  quantity?: string;
+  /** index in `tables`, only where tables of one sheet have different columns; absent: every used table of the sheet */
+  table?: number;
 }
 
 /** A value that holds for every row of a table though no column has it: a position above the table, a form answer. */
@@ -34,6 +38,8 @@ export interface TableConstant {
   /** cell it was read from, null when typed in the form */
   cell: string | null;
   reason: string;
+  /** as in ColumnProposal */
+  table?: number;
 }
 
 /** The proposal, and in the same form the person's correction of it. */

@@ -2,8 +2,7 @@
 const WORDS = new Set(
   [
     '', '-', '--', '---', '.', '..', '...', '?', '*', 'nan', 'na', 'n/a', 'n.a.', 'n.a', '#n/a', 'null', 'nil', 'none', 'nd', 'n.d.',
-    'n.d', 'no data', 'missing', 'miss', 'unknown', 'unk', 'void', 'tbd', 'k.a.', 'k. a.', 'k.a', 'keine angabe', 'fehlt', 's/d', 's.d.',
-    'sin dato', 'sin datos', 'n.c.', 'n/c', 'absent', 'manquant',
+    'n.d', 'no data', 'missing', 'miss', 'unknown', 'unk', 'void', 'tbd', 'k.a.', 'k. a.', 'k.a', 'keine angabe', 'fehlt', 's/d', 'sin dato', 'sin datos', 'n.c.', 'n/c', 'absent', 'manquant',
   ],
 ); // prettier-ignore
 

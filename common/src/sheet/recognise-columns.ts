@@ -1,0 +1,247 @@
+import type { DatasetKind, FieldDeclaration } from '../dataset/field';
+import { fluxQuantityOf } from '../dataset/flux-quantity';
+import { parseAgeUnit } from '../units/age';
+import { convertTo, UNIT_KINDS, type UnitKind } from '../units/convert';
+import { isUnitProblem } from '../units/unit';
+import type { ColumnHeading } from './column-headings';
+import { type Uncertainty, uncertaintyOf } from './heading';
+
+/** What one column may be. Several columns may claim one field; the best claim is chosen later. */
+export interface Claim {
+  heading: ColumnHeading;
+  field: string | null;
+  confidence: number;
+  reason: string;
+  /** of a mass flux: dust, or the tracer */
+  quantity?: string;
+  uncertainty?: Uncertainty;
+}
+
+/** Share of a column's filled cells that read as numbers; undefined for an empty column. */
+export type NumberShare = (index: number) => number | undefined;
+
+/**
+ * Recognises columns by heading, unit and values. Uncertainties go to the value on their left;
+ * tracer fluxes and concentrations are named for what they are, never taken for dust.
+ */
+export function recogniseColumns(
+  headings: ColumnHeading[],
+  kind: DatasetKind,
+  numberShare: NumberShare,
+): Claim[] {
+  const claims: Claim[] = [];
+  for (const heading of headings) {
+    const uncertainty = uncertaintyOf(heading);
+    claims.push(
+      uncertainty
+        ? claimUncertainty(heading, uncertainty, claims, kind)
+        : claimValue(heading, kind, numberShare),
+    );
+  }
+  return claims;
+}
+
+const none = (heading: ColumnHeading, reason: string, confidence = 0): Claim => ({
+  heading,
+  field: null,
+  confidence,
+  reason,
+});
+
+function claimValue(heading: ColumnHeading, kind: DatasetKind, numberShare: NumberShare): Claim {
+  const share = numberShare(heading.index);
+  if (heading.text === '' && heading.unit === null)
+    return none(heading, share === undefined ? 'Empty column.' : 'The column has no heading.');
+  const tracer = fluxQuantityOf(heading.text);
+  const isTracer = tracer !== null && tracer !== 'dust';
+  const claims = kind.fields
+    .filter((field) => field.field !== kind.sigmaField)
+    .map((field) => ({ field, ...likeness(heading, field, share) }))
+    .filter(({ score }) => score >= 0.3)
+    .sort((a, b) => b.score - a.score);
+  if (isTracer) {
+    const asTracer = claimTracer(heading, tracer, kind);
+    if (asTracer) return asTracer;
+  }
+  const best = claims[0];
+  if (!best) return byUnitAlone(heading, kind, share);
+  const claim: Claim = {
+    heading,
+    field: best.field.field,
+    confidence: Math.round(best.score * 100) / 100,
+    reason: best.reason,
+  };
+  return best.field.quantity === 'massFlux' && best.field.field === kind.valueField
+    ? { ...claim, quantity: tracer ?? 'dust' }
+    : claim;
+}
+
+/** A flux or concentration of calcium, iron … : kept under its own name, imported only where no dust flux is given. */
+function claimTracer(heading: ColumnHeading, tracer: string, kind: DatasetKind): Claim | null {
+  const isFlux =
+    /flux|fluss|flujo|flusso|(?<!\p{L})mar(?!\p{L})|deposition/iu.test(heading.text) ||
+    fits('massFlux', heading.unit);
+  if (isFlux && kind.valueField === 'fluxGM2Yr') {
+    return {
+      heading,
+      field: kind.valueField,
+      confidence: 0.5,
+      quantity: tracer,
+      reason: `A flux of ${tracer}: a tracer, not dust.`,
+    };
+  }
+  if (fits('concentration', heading.unit) || heading.unit === null) {
+    const declared = kind.fields.find(
+      (field) => field.headings.includes(heading.key) && field.quantity === 'massFraction',
+    );
+    return declared ? null : none(heading, `A concentration of ${tracer}, not a flux of dust.`, 0.8);
+  }
+  return null;
+}
+
+const fits = (kind: UnitKind, unit: string | null): boolean =>
+  unit !== null && !isUnitProblem(convertTo(kind, unit));
+
+/** How well a heading and its unit fit a field: 0 to 1. */
+function likeness(
+  heading: ColumnHeading,
+  field: FieldDeclaration,
+  share: number | undefined,
+): { score: number; reason: string } {
+  const [byWords, how] = wordLikeness(heading.key, field.headings);
+  if (byWords === 0) return { score: 0, reason: '' };
+  const unit = unitFit(heading, field);
+  if (field.quantity === 'text') {
+    const isNumeric = share !== undefined && share > 0.8 && !/^(?:sample|probe|id|bag|lab)/.test(heading.key);
+    return { score: byWords * (isNumeric && field.field !== 'remark' ? 0.4 : 1), reason: how };
+  }
+  const numeric =
+    share === undefined || share >= 0.3 || field.quantity === 'latitude' || field.quantity === 'longitude';
+  const score = byWords * unit.weight * (numeric ? 1 : 0.4);
+  return { score, reason: unit.reason === '' ? how : `${how.replace(/\.$/, '')}; ${unit.reason}` };
+}
+
+function wordLikeness(key: string, headings: string[]): [number, string] {
+  if (key === '') return [0, ''];
+  if (headings.includes(key)) return [0.95, `The heading is "${key}".`];
+  const words = key.split(' ');
+  let best: [number, string] = [0, ''];
+  for (const synonym of headings) {
+    const wanted = synonym.split(' ');
+    if (!wanted.every((word) => words.includes(word))) continue;
+    const score = 0.55 + 0.35 * (wanted.length / words.length) ** 0.5 * (wanted.length > 1 ? 1 : 0.75);
+    if (score > best[0] && (wanted.length > 1 || words.length <= 4) && synonym.length > 1)
+      best = [score, `The heading holds "${synonym}".`];
+  }
+  return best;
+}
+
+function unitFit(
+  heading: ColumnHeading,
+  { quantity, canonicalUnit }: FieldDeclaration,
+): { weight: number; reason: string } {
+  if (quantity === 'text') return { weight: 1, reason: '' };
+  if (quantity === 'count')
+    return heading.unit === null
+      ? { weight: 1, reason: '' }
+      : { weight: 0.5, reason: `a count with the unit ${heading.unit}.` };
+  if (quantity === 'age') {
+    const age = parseAgeUnit(heading.unit ?? '', heading.text);
+    return isUnitProblem(age)
+      ? { weight: 0.6, reason: 'no unit of an age is given.' }
+      : { weight: 1, reason: `the unit ${age.text} is one of an age.` };
+  }
+  const kind = quantity === 'latitude' || quantity === 'longitude' ? 'angle' : quantity;
+  if (heading.unit === null)
+    return { weight: kind === 'angle' || UNIT_KINDS[kind].canonical === '1' ? 1 : 0.8, reason: '' };
+  return fits(kind, heading.unit)
+    ? { weight: 1.04, reason: `the unit ${heading.unit} converts to ${canonicalUnit}.` }
+    : { weight: 0.45, reason: `but the unit ${heading.unit} does not convert to ${canonicalUnit}.` };
+}
+
+/** No heading that is known, but a unit that only one field can have. */
+function byUnitAlone(heading: ColumnHeading, kind: DatasetKind, share: number | undefined): Claim {
+  const { unit } = heading;
+  if (unit === null || (share ?? 0) < 0.3) return none(heading, 'No field of this kind is headed so.');
+  const age = parseAgeUnit(unit);
+  if (!isUnitProblem(age) && age.datum !== null && kind.fields.some((field) => field.field === 'ageKaBp')) {
+    return { heading, field: 'ageKaBp', confidence: 0.6, reason: `Only an age has the unit ${unit}.` };
+  }
+  const names = fluxQuantityOf(heading.text);
+  if (names === 'dust' && fits('massFlux', unit) && kind.valueField === 'fluxGM2Yr') {
+    return {
+      heading,
+      field: kind.valueField,
+      confidence: 0.75,
+      quantity: 'dust',
+      reason: `It names dust and has the unit of a flux, ${unit}.`,
+    };
+  }
+  return none(heading, 'No field of this kind is headed so.');
+}
+
+/** Fields an uncertainty can belong to, and the field of the uncertainty. */
+function sigmaFieldOf(field: string | null, kind: DatasetKind): string | null {
+  if (field === kind.valueField) return kind.sigmaField;
+  return field === 'ageKaBp' && kind.fields.some((declared) => declared.field === 'ageSigmaKa')
+    ? 'ageSigmaKa'
+    : null;
+}
+
+function claimUncertainty(
+  heading: ColumnHeading,
+  uncertainty: Uncertainty,
+  before: Claim[],
+  kind: DatasetKind,
+): Claim {
+  const named = uncertainty.baseKey === '' ? undefined : namedClaim(uncertainty.baseKey, before);
+  const owner =
+    named ?? before.filter((claim) => !claim.uncertainty && claim.reason !== 'Empty column.').at(-1);
+  const what = uncertainty.deviation
+    ? 'standard deviation'
+    : uncertainty.sigmas === 2
+      ? 'two standard errors'
+      : 'uncertainty';
+  const field = owner ? sigmaFieldOf(owner.field, kind) : null;
+  if (!owner || field === null) {
+    return {
+      ...none(
+        heading,
+        `The ${what} of ${owner ? `"${owner.heading.text}"` : 'a column'}, which has no field here.`,
+      ),
+      uncertainty,
+    };
+  }
+  const unit =
+    heading.unit !== null && looksCompatible(heading.unit, field) ? heading.unit : owner.heading.unit;
+  const taken =
+    unit === heading.unit ? '' : ` It has no unit of its own; that of "${owner.heading.text}" is taken.`;
+  return {
+    heading: { ...heading, unit },
+    field,
+    confidence: named ? 0.9 : 0.8,
+    reason: `The ${what} of "${owner.heading.text}".${taken}`,
+    uncertainty,
+    ...(owner.quantity ? { quantity: owner.quantity } : {}),
+  };
+}
+
+const looksCompatible = (unit: string, field: string): boolean =>
+  field === 'ageSigmaKa'
+    ? !isUnitProblem(parseAgeUnit(unit))
+    : field === 'aodSigma' || !/^\d\s*\p{L}$/u.test(unit);
+
+/** The value column that an uncertainty names: "Age error", "Dust flux ± ". */
+function namedClaim(baseKey: string, before: Claim[]): Claim | undefined {
+  const words = baseKey.split(' ');
+  const score = (claim: Claim): number => {
+    const own = claim.heading.key.split(' ');
+    return words.filter((word) => own.includes(word)).length / Math.max(words.length, own.length);
+  };
+  const candidates = before.filter((claim) => !claim.uncertainty && claim.heading.key !== '');
+  const best = candidates.reduce<Claim | undefined>(
+    (top, claim) => (top === undefined || score(claim) >= score(top) ? claim : top),
+    undefined,
+  );
+  return best && score(best) > 0.3 ? best : undefined;
+}

@@ -1,4 +1,5 @@
 import { createHmac } from 'node:crypto';
+import { AccountSweep } from '../src/auth/account-sweep';
 import { keyFor } from '../src/auth/signing-keys';
 import { DEMO_PASSWORD, demoAddress, signedIn, signedInAs } from './support/sign-in';
 import { travel } from './support/travel';
@@ -217,4 +218,14 @@ test('many good sign-ins of one person at once all succeed', async () => {
     Array.from({ length: 12 }, () => signedIn(service, demoAddress('admin'))),
   );
   expect(new Set(callers.map(({ cookie }) => cookie)).size).toBe(12);
+});
+
+test('sessions that ended long ago are swept, those of late are kept', async () => {
+  const person = await signedInAs(service, 'steward2');
+  const sweep = service.app.get(AccountSweep, { strict: false });
+  expect(await sweep.sweep()).toBe(0);
+  travel(91 * 24 * 60 * MINUTE);
+  expect(await sweep.sweep()).toBeGreaterThan(0);
+  jest.restoreAllMocks();
+  await person.get('/api/v1/me').expect(401);
 });

@@ -67,6 +67,12 @@ export const firstAdministrator = z.strictObject({
 });
 export type FirstAdministrator = z.infer<typeof firstAdministrator>;
 
+/** Whose account a link was for, so that the sign-in form need not ask again. */
+export const linkUsed = z.object({ email: z.string() });
+
+/** The same for everybody, known here or not. */
+export const passwordResetAsked = z.object({ detail: z.string() });
+
 export const changePassword = z.strictObject({ presentPassword, newPassword });
 export type ChangePassword = z.infer<typeof changePassword>;
 
@@ -80,6 +86,8 @@ export const sessionView = z.object({
   address: z.string(),
 });
 export type SessionView = z.infer<typeof sessionView>;
+
+export const sessionList = z.object({ items: z.array(sessionView) });
 
 /** Each scope stands for itself: a token with `write` alone cannot read. */
 export const SCOPES = ['read', 'write', 'admin'] as const;
@@ -109,6 +117,8 @@ export const accessTokenView = z.object({
   lastUsedAt: z.string().nullable(),
 });
 export type AccessTokenView = z.infer<typeof accessTokenView>;
+
+export const accessTokenList = z.object({ items: z.array(accessTokenView) });
 
 export const accessTokenCreated = accessTokenView.extend({
   token: z.string().meta({ description: 'Shown this once; only its hash is kept.' }),

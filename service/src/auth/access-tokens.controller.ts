@@ -1,11 +1,17 @@
 import { Body, Controller, Delete, Get, HttpCode, Param, Post, Req, Res } from '@nestjs/common';
-import { ApiOperation, ApiTags } from '@nestjs/swagger';
+import {
+  ApiCreatedResponse,
+  ApiNoContentResponse,
+  ApiOkResponse,
+  ApiOperation,
+  ApiTags,
+} from '@nestjs/swagger';
 import type { AccessTokenCreated, AccessTokenView } from '@siltlight/common/wire/auth';
 import type { Request, Response } from 'express';
 import { problem } from '../http/problem';
 import { AccessTokensService } from './access-tokens.service';
 import { callerOf } from './caller';
-import { AccessTokenRequestDto } from './dto';
+import { AccessTokenCreatedDto, AccessTokenListDto, AccessTokenRequestDto } from './dto';
 import { PasswordChangeService } from './password-change.service';
 import { CalledWith, type Credential, Person, SignedIn, SignedInOnly } from './policy';
 import { FRESH_MS } from './session-limits';
@@ -21,6 +27,7 @@ export class AccessTokensController {
   @Post()
   @SignedInOnly({ sessionOnly: true })
   @ApiOperation({ summary: 'Make an access token for scripts; it is shown this once' })
+  @ApiCreatedResponse({ type: AccessTokenCreatedDto })
   async create(
     @SignedIn() person: Person,
     @CalledWith() credential: Credential,
@@ -44,6 +51,7 @@ export class AccessTokensController {
   @Get()
   @SignedInOnly()
   @ApiOperation({ summary: 'The own access tokens that are alive, newest first' })
+  @ApiOkResponse({ type: AccessTokenListDto })
   async list(@SignedIn() person: Person): Promise<{ items: AccessTokenView[] }> {
     return { items: await this.tokens.list(person) };
   }
@@ -52,6 +60,7 @@ export class AccessTokensController {
   @HttpCode(204)
   @SignedInOnly({ sessionOnly: true })
   @ApiOperation({ summary: 'Revoke one of the own access tokens' })
+  @ApiNoContentResponse()
   async revoke(@SignedIn() person: Person, @Param('id') id: string): Promise<void> {
     await this.tokens.revoke(person, id);
   }

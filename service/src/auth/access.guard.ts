@@ -38,13 +38,17 @@ export class AccessGuard implements CanActivate {
       context.getClass(),
     ]);
     try {
-      requireOwnOrigin(request, this.settings.publicUrl);
-      if (policy?.who === 'public') return true;
+      if (policy?.who === 'public') {
+        requireOwnOrigin(request, this.settings.publicUrl);
+        return true;
+      }
       const { person, credential } = await this.authenticate(context, request);
       Object.assign(request, { person, credential });
       requireAllowed(request, policy, person, credential);
-      if (credential.kind === 'session')
+      requireOwnOrigin(request, this.settings.publicUrl);
+      if (credential.kind === 'session') {
         requireProofAgainstForgery(request, credential.sessionId, this.settings.secret);
+      }
       return true;
     } catch (error) {
       if (error instanceof Problem) this.logRefusal(request, error);

@@ -1,11 +1,11 @@
 import { Body, Controller, Get, HttpCode, Post, Req, Res } from '@nestjs/common';
-import { ApiOperation, ApiTags } from '@nestjs/swagger';
+import { ApiNoContentResponse, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { SessionAnswer, SignInOptions } from '@siltlight/common/wire/auth';
 import type { Request, Response } from 'express';
 import { Settings } from '../config/settings';
 import { demoAccounts } from '../users/demo-accounts';
 import { callerOf } from './caller';
-import { SignInDto } from './dto';
+import { SessionAnswerDto, SignInDto, SignInOptionsDto } from './dto';
 import { CalledWith, type Credential, Person, Public, SignedIn, SignedInOnly } from './policy';
 import { sessionCookie } from './session-cookie';
 import { ABSOLUTE_MS } from './session-limits';
@@ -24,6 +24,7 @@ export class AuthController {
   @Get('options')
   @Public()
   @ApiOperation({ summary: 'What the sign-in page shows before anybody is signed in' })
+  @ApiOkResponse({ type: SignInOptionsDto })
   options(): SignInOptions {
     const { demo } = this.settings;
     return {
@@ -36,6 +37,7 @@ export class AuthController {
   @HttpCode(200)
   @Public()
   @ApiOperation({ summary: 'Sign in with e-mail and password; sets the session cookie' })
+  @ApiOkResponse({ type: SessionAnswerDto })
   async signIn(
     @Body() wanted: SignInDto,
     @Req() request: Request,
@@ -51,6 +53,7 @@ export class AuthController {
   @HttpCode(204)
   @SignedInOnly({ sessionOnly: true })
   @ApiOperation({ summary: 'End this session on the server and in the browser' })
+  @ApiNoContentResponse()
   async signOut(
     @SignedIn() person: Person,
     @CalledWith() credential: Credential,
@@ -64,6 +67,7 @@ export class AuthController {
   @Get('session')
   @SignedInOnly({ sessionOnly: true })
   @ApiOperation({ summary: 'Who is signed in, and the token that changing calls must carry' })
+  @ApiOkResponse({ type: SessionAnswerDto })
   session(
     @SignedIn() person: Person,
     @CalledWith() credential: Credential,

@@ -9,6 +9,7 @@ import { AccessGuard } from './access.guard';
 import { AccessTokensController } from './access-tokens.controller';
 import { AccessTokensService } from './access-tokens.service';
 import { AccountLinksController } from './account-links.controller';
+import { AccountSweep } from './account-sweep';
 import { AuthController } from './auth.controller';
 import { FirstAdministratorService } from './first-administrator.service';
 import { MeController } from './me.controller';
@@ -36,6 +37,7 @@ import { SignInThrottle } from './sign-in-throttle';
   providers: [
     { provide: APP_GUARD, useClass: AccessGuard },
     AccessTokensService,
+    AccountSweep,
     FirstAdministratorService,
     MeService,
     OneTimeTokensService,

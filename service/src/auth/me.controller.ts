@@ -11,14 +11,14 @@ import {
   Req,
   Res,
 } from '@nestjs/common';
-import { ApiOperation, ApiTags } from '@nestjs/swagger';
+import { ApiNoContentResponse, ApiOkResponse, ApiOperation, ApiTags } from '@nestjs/swagger';
 import type { SessionView } from '@siltlight/common/wire/auth';
 import type { PersonView } from '@siltlight/common/wire/people';
 import type { Request, Response } from 'express';
-import { ChangeMeDto } from '../users/dto';
-import { expectedVersion, versionTag } from '../users/expected-version';
+import { ChangeMeDto, PersonViewDto } from '../users/dto';
+import { expectedVersion, versionTag } from '../http/expected-version';
 import { callerOf } from './caller';
-import { ChangePasswordDto } from './dto';
+import { ChangePasswordDto, SessionListDto } from './dto';
 import { MeService } from './me.service';
 import { PasswordChangeService } from './password-change.service';
 import { CalledWith, type Credential, Person, SignedIn, SignedInOnly } from './policy';
@@ -37,6 +37,7 @@ export class MeController {
   @Get()
   @SignedInOnly()
   @ApiOperation({ summary: 'The own account' })
+  @ApiOkResponse({ type: PersonViewDto })
   async view(
     @SignedIn() person: Person,
     @Res({ passthrough: true }) response: Response,
@@ -47,6 +48,7 @@ export class MeController {
   @Patch()
   @SignedInOnly()
   @ApiOperation({ summary: 'Change the own name or ORCID iD; If-Match or version is needed' })
+  @ApiOkResponse({ type: PersonViewDto })
   async change(
     @SignedIn() person: Person,
     @Body() wanted: ChangeMeDto,
@@ -60,6 +62,7 @@ export class MeController {
   @HttpCode(204)
   @SignedInOnly({ sessionOnly: true })
   @ApiOperation({ summary: 'Change the own password; ends the other sessions' })
+  @ApiNoContentResponse()
   async changePassword(
     @SignedIn() person: Person,
     @CalledWith() credential: Credential,
@@ -72,6 +75,7 @@ export class MeController {
   @Get('sessions')
   @SignedInOnly()
   @ApiOperation({ summary: 'The own sessions that are alive, newest first' })
+  @ApiOkResponse({ type: SessionListDto })
   async listSessions(
     @SignedIn() person: Person,
     @CalledWith() credential: Credential,
@@ -83,6 +87,7 @@ export class MeController {
   @HttpCode(204)
   @SignedInOnly({ sessionOnly: true })
   @ApiOperation({ summary: 'End one of the own sessions' })
+  @ApiNoContentResponse()
   async endSession(@SignedIn() person: Person, @Param('id') id: string): Promise<void> {
     await this.sessions.end(person, id, 'end-session');
   }

@@ -2,7 +2,7 @@ import { Injectable } from '@nestjs/common';
 import type { ChangeMe, PersonView } from '@siltlight/common/wire/people';
 import { WriteQueue } from '../database/write-queue';
 import { LedgerService } from '../ledger/ledger.service';
-import { changedMeanwhile } from '../users/expected-version';
+import { changedMeanwhile } from '../http/expected-version';
 import { initialsOf } from '../users/initials';
 import { PeopleService, viewOf } from '../users/people.service';
 import type { Person } from './policy';

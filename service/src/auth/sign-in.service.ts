@@ -1,4 +1,4 @@
-import { Injectable } from '@nestjs/common';
+import { Injectable, type OnModuleInit } from '@nestjs/common';
 import type { SessionAnswer, SignInRequest } from '@siltlight/common/wire/auth';
 import { Settings } from '../config/settings';
 import { WriteQueue } from '../database/write-queue';
@@ -13,7 +13,7 @@ import { SignInThrottle } from './sign-in-throttle';
 import { csrfTokenOf } from './signing-keys';
 
 @Injectable()
-export class SignInService {
+export class SignInService implements OnModuleInit {
   constructor(
     private readonly people: PeopleService,
     private readonly sessions: SessionsService,
@@ -22,6 +22,11 @@ export class SignInService {
     private readonly ledger: LedgerService,
     private readonly settings: Settings,
   ) {}
+
+  /** So that the first stranger after a start waits no longer than the next. */
+  async onModuleInit(): Promise<void> {
+    await passwordMatches(null, '');
+  }
 
   /** Unknown, invited and disabled people and wrong passwords get the same answer after the same work. */
   async signIn(

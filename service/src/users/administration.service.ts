@@ -10,7 +10,7 @@ import { nowIso } from '../database/row';
 import { pageOf } from '../http/paging';
 import { notFound, problem } from '../http/problem';
 import { LedgerService } from '../ledger/ledger.service';
-import { changedMeanwhile } from './expected-version';
+import { changedMeanwhile } from '../http/expected-version';
 import type { PersonRow } from './models/person-row';
 import { PeopleService, rolesOf, stateOf, viewOf } from './people.service';
 

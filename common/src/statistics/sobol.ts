@@ -1,4 +1,5 @@
 import { requireWithin } from '../physical/domain-error';
+import { seededWholeNumbers } from './seeded-numbers';
 import { SOBOL_DIRECTIONS } from './sobol-directions';
 
 const BITS = 30;
@@ -66,16 +67,4 @@ export function scrambledSobolPoints(count: number, dimensions: number, seed: nu
     sobolWholeNumbers(count, dimensions),
     (whole, i) => ((whole ^ shifts[i % dimensions]!) + 0.5) * SCALE,
   );
-}
-
-/** Stream of 32-bit numbers: a Weyl step of the golden ratio, mixed as in MurmurHash3's finaliser (public domain). */
-function seededWholeNumbers(seed: number): () => number {
-  let state = seed >>> 0;
-  return () => {
-    state = (state + 0x9e3779b9) >>> 0;
-    let mixed = state;
-    mixed = Math.imul(mixed ^ (mixed >>> 16), 0x85ebca6b);
-    mixed = Math.imul(mixed ^ (mixed >>> 13), 0xc2b2ae35);
-    return (mixed ^ (mixed >>> 16)) >>> 0;
-  };
 }

@@ -7,7 +7,8 @@ export type MemberValues = Record<VariedInput, number>;
 /** What physics allows; a distribution must be cut so that it stays inside. */
 const ALLOWED: Record<VariedInput, { unit: string; min: number; max: number }> = {
   singleScatteringAlbedo: { unit: '', min: 0, max: 1 },
-  asymmetry: { unit: '', min: -0.95, max: 0.95 },
+  // beyond it the Legendre series kept by the daily form is too short
+  asymmetry: { unit: '', min: -0.9, max: 0.9 },
   transmittance: { unit: '', min: 0, max: 1 },
   opticalDepthFactor: { unit: '', min: 0, max: 100 },
   surfaceAlbedoFactor: { unit: '', min: 0, max: 1.15 },

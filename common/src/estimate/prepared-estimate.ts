@@ -60,6 +60,7 @@ function requireFit(inputs: EstimateInputs): void {
   requireParameters(inputs);
   requireWithin('massExtinctionM2PerG', inputs.optics.massExtinctionM2PerG, 'm² g⁻¹', 1e-4, 100);
   requireWithin('field.sharedSe', inputs.field.sharedSe, '', 0, 10);
+  requireField(inputs.field);
   requireWithin('ensemble.members', inputs.ensemble.members, '', 1, 65_536);
   for (const { solarConstantWm2 } of [inputs.slice, inputs.reference]) {
     requireWithin('solarConstantWm2', solarConstantWm2, 'W m⁻²', 500, 2000);
@@ -75,5 +76,19 @@ function requireFit(inputs: EstimateInputs): void {
   }
   if (inputs.longwave?.sky === 'clear') {
     requireWithin('longwave.highCloudFraction', inputs.longwave.highCloudFraction, '', 0, 1);
+  }
+}
+
+function requireField({ base, regions, global }: EstimateInputs['field']): void {
+  for (const hemisphere of ['south', 'north'] as const) {
+    for (const surface of ['land', 'ocean'] as const) {
+      const field = `field.base.opticalDepth.${hemisphere}.${surface}`;
+      requireWithin(field, base.opticalDepth[hemisphere][surface], '', 0, 5);
+    }
+  }
+  for (const { lnRatio, sharedLoad, ownSe } of [...regions, global]) {
+    requireWithin('field.lnRatio', lnRatio, '', -10, 10);
+    requireWithin('field.sharedLoad', sharedLoad, '', 0, 1);
+    requireWithin('field.ownSe', ownSe, '', 0, 10);
   }
 }

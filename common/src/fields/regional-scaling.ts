@@ -31,7 +31,9 @@ export interface RegionalScaling {
   /** every region of the set, in table order */
   regions: RegionRatio[];
   /** what regions without sites, and places in no region, take */
-  global: { ratio: number; lnRatio: number; lnRatioSe: number; low: number; high: number };
+  global: Pick<RegionRatio, 'ratio' | 'lnRatio' | 'lnRatioSe' | 'low' | 'high' | 'sharedLoad' | 'ownSe'>;
+  /** standard error of the global mean of ln R alone, which `sharedLoad` multiplies */
+  sharedSe: number;
   unused: UnusedSite[];
   diagnostics: {
     tauSquared: number;
@@ -81,10 +83,10 @@ export function regionalScaling(sites: readonly SiteFlux[]): RegionalScaling {
       overall,
     ),
   );
-  const globalSe = Math.sqrt(overall.standardError ** 2 + overall.betweenVariance);
   return {
     regions,
-    global: { ...onScale(overall.mean, globalSe), lnRatio: overall.mean, lnRatioSe: globalSe },
+    global: withoutSites(overall),
+    sharedSe: overall.standardError,
     unused,
     diagnostics: {
       tauSquared: overall.betweenVariance,
@@ -114,6 +116,12 @@ function globalEffect(used: SiteRatio[]): RandomEffects {
   const estimated = randomEffects(studies);
   if (used.length >= 3) return estimated;
   return randomEffects(studies, Math.max(estimated.betweenVariance, FALLBACK_BETWEEN_SD ** 2));
+}
+
+function withoutSites(overall: RandomEffects): RegionalScaling['global'] {
+  const ownSe = Math.sqrt(overall.betweenVariance);
+  const lnRatioSe = Math.hypot(overall.standardError, ownSe);
+  return { ...onScale(overall.mean, lnRatioSe), lnRatio: overall.mean, lnRatioSe, sharedLoad: 1, ownSe };
 }
 
 function regionRatio(code: string, name: string, sites: SiteRatio[], overall: RandomEffects): RegionRatio {

@@ -1,4 +1,4 @@
-import { gaussLegendre } from '../optics/gauss-legendre';
+import { gaussLegendre, type GaussRule } from '../optics/gauss-legendre';
 import { sunCourse } from '../orbit/daily-insolation';
 import type { Orbit } from '../orbit/orbit';
 import { requireWithin } from '../physical/domain-error';
@@ -23,7 +23,7 @@ export interface DailyMoments {
  * @param solarConstantWm2 S₀ at the semi-major axis [W m⁻²]
  * @param order highest odd n; `upscatterOrder(g)` tells how many a g needs
  *
- * P_n is a polynomial of degree n in cos H: the Gauss rule in H has order/2 + 24 points, which leaves less than 1e-12.
+ * @param rule made once by `litHoursRule(order)` where many rows and months are wanted
  */
 export function dailyMoments(
   latitudeDeg: number,
@@ -31,12 +31,13 @@ export function dailyMoments(
   orbit: Orbit,
   solarConstantWm2: number,
   order: number,
+  rule: GaussRule = litHoursRule(order),
 ): DailyMoments {
   requireWithin('solarConstantWm2', solarConstantWm2, 'W m⁻²', 0, 10_000);
   const { a, b, h0, sunDistanceAu } = sunCourse(latitudeDeg, solarLongitudeDeg, orbit);
   const legendre = new Float64Array((order + 1) / 2);
   if (h0 === 0) return { incidentWm2: 0, meanMu: 0, legendre };
-  const { nodes, weights } = gaussLegendre(Math.ceil(order / 2) + 24);
+  const { nodes, weights } = rule;
   for (let i = 0; i < nodes.length; i += 1) {
     // Rounding may put μ₀ a hair below the horizon at H₀ itself.
     const mu = Math.max(0, a + b * Math.cos((h0 * (1 + nodes[i]!)) / 2));
@@ -47,6 +48,11 @@ export function dailyMoments(
     meanMu: (a * h0 + b * Math.sin(h0)) / h0,
     legendre,
   };
+}
+
+/** P_n(μ₀) is a polynomial of degree n in cos H: a Gauss rule in H of order/2 + 24 points leaves less than 1e-12. */
+export function litHoursRule(order: number): GaussRule {
+  return gaussLegendre(Math.ceil(order / 2) + 24);
 }
 
 /** ⟨β⟩ over the lit hours. */

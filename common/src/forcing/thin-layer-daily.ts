@@ -8,9 +8,6 @@ import { longwaveTerm, type LongwaveInput } from './longwave';
 import { result, type ForcingMethod, type ForcingResult } from './method';
 import { thinLayerCautions } from './thin-layer-cautions';
 
-export { dailyMeanUpscatter, dailyMoments, type DailyMoments } from './daily-moments';
-export { hgUpscatterCoefficients } from '../optics/upscatter';
-
 export interface ThinLayerDailyInput {
   latitudeDeg: number;
   /** this or `orbit` */

@@ -17,7 +17,9 @@ import { LedgerModule } from './ledger/ledger.module';
 import { NotificationsModule } from './notifications/notifications.module';
 import { OpticsModule } from './optics/optics.module';
 import { RegionsModule } from './regions/regions.module';
+import { ReviewModule } from './review/review.module';
 import { SlicesModule } from './slices/slices.module';
+import { SubmissionsModule } from './submissions/submissions.module';
 import { UsersModule } from './users/users.module';
 import { VersionsModule } from './versions/versions.module';
 
@@ -42,7 +44,9 @@ export class AppModule {
         NotificationsModule,
         OpticsModule,
         RegionsModule,
+        ReviewModule,
         SlicesModule,
+        SubmissionsModule,
         UsersModule,
         VersionsModule,
       ],

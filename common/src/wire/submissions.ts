@@ -247,7 +247,10 @@ export const rowPlaces = z
   .max(5000);
 export const leaveOutRequest = z.object({ rows: rowPlaces, reason: reasonText });
 export const takeBackRequest = z.object({ rows: rowPlaces });
-export const waiverRequest = z.object({ findingKey: z.string().max(500), reason: reasonText });
+export const waiverRequest = z.object({
+  findingKeys: z.array(z.string().max(500)).min(1).max(2000),
+  reason: reasonText,
+});
 export const queryRequest = z.object({
   sheet: z.string().max(200),
   row: z.number().int().min(1),

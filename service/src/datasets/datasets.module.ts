@@ -9,6 +9,7 @@ import { DatasetDependants } from './dataset-dependants';
 import { DatasetPublishing } from './dataset-publishing.service';
 import { DatasetsController } from './datasets.controller';
 import { DatasetsService } from './datasets.service';
+import { HeldSites } from './held-sites.service';
 import { SampleRow } from './models/sample-row';
 import { SamplesService } from './samples.service';
 import { SourceCells } from './source-cells.service';
@@ -23,7 +24,7 @@ import { SourceCells } from './source-cells.service';
     WorkersModule,
   ],
   controllers: [DatasetsController],
-  providers: [DatasetDependants, DatasetPublishing, DatasetsService, SamplesService, SourceCells],
-  exports: [DatasetDependants, DatasetPublishing, DatasetsService, SamplesService],
+  providers: [DatasetDependants, DatasetPublishing, DatasetsService, HeldSites, SamplesService, SourceCells],
+  exports: [DatasetDependants, DatasetPublishing, DatasetsService, HeldSites, SamplesService],
 })
 export class DatasetsModule {}

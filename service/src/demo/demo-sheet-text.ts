@@ -1,4 +1,4 @@
-import { csvTable } from '../exports/formats/csv';
+import { csvTable } from '../http/csv';
 import type { DemoSheet, DemoSite } from './demo-sites';
 
 const AGES_KA = [0.6, 1.5, 2.4, 3.3, 6.1, 8.9, 12.2, 14.8, 16.9, 19.4, 20.3, 21.2, 22.1, 24.6, 28.3, 33.1];

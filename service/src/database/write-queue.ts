@@ -17,13 +17,13 @@ const RETRY_AFTER_SECONDS = 2;
 export class WriteQueue {
   private tail: Promise<unknown> = Promise.resolve();
   private waiting = 0;
-  private readonly inside = new AsyncLocalStorage<boolean>();
+  private readonly inside = new AsyncLocalStorage<{ open: boolean }>();
   longestMs = 0;
 
   constructor(@InjectConnection() private readonly database: Sequelize) {}
 
   run<T>(work: (transaction: Transaction) => Promise<T>): Promise<T> {
-    if (this.inside.getStore()) {
+    if (this.inside.getStore()?.open) {
       // Waiting for oneself would never end.
       return Promise.reject(new Error('WriteQueue.run was called inside a write: pass the transaction on.'));
     }
@@ -42,10 +42,20 @@ export class WriteQueue {
   private async perform<T>(work: (transaction: Transaction) => Promise<T>): Promise<T> {
     const startedAt = performance.now();
     try {
-      return await this.inside.run(true, () => this.database.transaction(work));
+      return await this.database.transaction((transaction) => this.marked(() => work(transaction)));
     } finally {
       this.waiting -= 1;
       this.longestMs = Math.max(this.longestMs, performance.now() - startedAt);
+    }
+  }
+
+  /** The mark ends with the work: what a commit sets going, such as sending mail, may write again. */
+  private async marked<T>(work: () => Promise<T>): Promise<T> {
+    const mark = { open: true };
+    try {
+      return await this.inside.run(mark, work);
+    } finally {
+      mark.open = false;
     }
   }
 }

@@ -199,6 +199,10 @@ describe('a changing call from a foreign page', () => {
     expect((await foreign.send(credentials).expect(403)).body.code).toBe('foreign-origin');
     const opaque = service.stranger().post('/api/v1/auth/sign-in').set('Origin', 'null');
     await opaque.send(credentials).expect(403);
+    const cross = service.stranger().post('/api/v1/auth/sign-in').set('Origin', 'https://elsewhere.example');
+    await cross.set('Sec-Fetch-Site', 'cross-site').send(credentials).expect(403);
+    const proxied = service.stranger().post('/api/v1/auth/sign-in').set('Origin', 'http://127.0.0.1:5173');
+    await proxied.set('Sec-Fetch-Site', 'same-origin').send(credentials).expect(200);
     const own = service.stranger().post('/api/v1/auth/sign-in').set('Origin', service.settings.publicUrl);
     await own.send(credentials).expect(200);
     const line = service.logged.find(

@@ -9,6 +9,8 @@ const SAFE = new Set(['GET', 'HEAD', 'OPTIONS']);
 export function requireOwnOrigin(request: Request, publicUrl: string): void {
   const { origin } = request.headers;
   if (SAFE.has(request.method) || origin === undefined) return;
+  // The browser's own word, which no page can set: a development proxy in between changes Host, not this.
+  if (request.headers['sec-fetch-site'] === 'same-origin') return;
   const own = [new URL(publicUrl).host, request.headers.host];
   if (URL.canParse(origin) && own.includes(new URL(origin).host)) return;
   throw problem(

@@ -4,7 +4,7 @@ import { checkTable, numberIn, relativeError } from '../../test/check-table';
 import { upscatterMean } from '../optics/upscatter';
 import { burdenOfDeposition } from './column';
 import { criticalSingleScatteringAlbedo, criticalSurfaceAlbedo } from './critical-albedo';
-import { thinLayer } from './thin-layer';
+import { thinLayer, thinLayerForcing } from './thin-layer';
 
 const share = fc.double({ min: 0, max: 1, noNaN: true });
 const base = { transmittance: 0.76, cloudFraction: 0.6, surfaceAlbedo: 0.1, opticalDepth: 0.05 };
@@ -105,6 +105,33 @@ test('the worked examples come out: sulfate, dust over ocean and snow, soot over
     expect(Math.abs(answer.shortwaveWm2 - of('dF TOA')), name).toBeLessThan(1e-8);
     expect(Math.abs(answer.criticalSingleScatteringAlbedo! - of('critical ssa')), name).toBeLessThan(1e-9);
   }
+});
+
+// Exact albedo changes by adding–doubling; four digits printed.
+test('the albedo change behind the half-day form is the tabulated one, and its error is what the cautions say', () => {
+  const errors = new Map<number, number[]>();
+  for (const row of checkTable('optics/error_mean_case.csv')) {
+    const [tau, omega, g, albedo] = ['tau', 'omega', 'g', 'surface_albedo'].map((column) =>
+      numberIn(row, column),
+    ) as [number, number, number, number];
+    // S₀/4 of sunlight: ΔF = −(S₀/4) ΔA, the light of the half-day form is S₀/2.
+    const change = -4 * thinLayerForcing(0.5, albedo, tau, omega, upscatterMean(g));
+    const label = JSON.stringify(row);
+    expect(Math.abs(change - numberIn(row, 'thin_layer_delta_albedo')), label).toBeLessThan(
+      6e-5 * Math.max(0.1, Math.abs(change)) + 1e-7,
+    );
+    const dustOverDark = omega >= 0.9 && omega < 1 && g >= 0.65 && g <= 0.8 && albedo <= 0.1;
+    if (!dustOverDark) continue;
+    const exact = numberIn(row, 'exact_delta_albedo');
+    errors.set(tau, [...(errors.get(tau) ?? []), (100 * (change - exact)) / exact]);
+  }
+  const within = (tau: number, low: number, high: number) => {
+    expect(Math.min(...errors.get(tau)!), `τ ${tau}`).toBeGreaterThan(low);
+    expect(Math.max(...errors.get(tau)!), `τ ${tau}`).toBeLessThan(high);
+  };
+  within(0.05, 14.5, 20.5);
+  within(0.1, 22.5, 33.5);
+  within(0.3, 47.5, 71.5);
 });
 
 test('no layer, no effect; the effect is linear in optical depth', () => {

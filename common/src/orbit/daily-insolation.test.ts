@@ -46,6 +46,10 @@ test('daily insolation, day length and mean sun angles equal independent values 
       label,
     ).toBeLessThan(1e-9);
     expect(
+      relativeError(day.litFraction * day.meanCosZenithDaylight, numberIn(row, 'mean_cos_zenith_24h')),
+      label,
+    ).toBeLessThan(1e-9);
+    expect(
       relativeError(day.sunDistanceAu, numberIn(row, 'sun_distance_over_semimajor_axis')),
       label,
     ).toBeLessThan(1e-9);

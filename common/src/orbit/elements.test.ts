@@ -1,6 +1,7 @@
 import { expect, test } from 'vitest';
 import { checkTable, numberIn, relativeError } from '../../test/check-table';
 import { PMIP_SLICES } from '../tables/pmip-slices';
+import { dailyInsolation } from './daily-insolation';
 import { bergerOrbit, protocolOrbit } from './elements';
 
 const turn = (a: number, b: number) => Math.abs(((a - b + 540) % 360) - 180);
@@ -40,13 +41,24 @@ test('the series agrees with the elements that protocols and the program of 1978
   }
 });
 
-// 8 to 9 printed digits.
-test('the distance from the tabulated Berger & Loutre 1991 solution is the one measured independently', () => {
+// 8 to 10 printed digits; insolation at 65° N in June to four decimals.
+test('elements and midsummer insolation equal the compared solutions, Berger & Loutre 1991 from its printed table', () => {
   for (const row of checkTable('orbit/solutions_compared.csv')) {
     const { orbit } = bergerOrbit(numberIn(row, 'age_ka_before_1950'));
     const age = `${row.age_ka_before_1950} ka`;
-    const difference = orbit.eccentricity - numberIn(row, 'bl91_eccentricity');
-    expect(Math.abs(difference - numberIn(row, 'diff_ecc_b78_minus_bl91')), age).toBeLessThan(1e-7);
+    expect(Math.abs(orbit.eccentricity - numberIn(row, 'b78_eccentricity')), age).toBeLessThan(1e-9);
+    expect(Math.abs(orbit.obliquityDeg - numberIn(row, 'b78_obliquity_deg')), age).toBeLessThan(1e-6);
+    expect(turn(orbit.perihelionLongitudeDeg, numberIn(row, 'b78_perihelion_deg')), age).toBeLessThan(1e-5);
+    const printed = {
+      eccentricity: numberIn(row, 'bl91_eccentricity'),
+      obliquityDeg: numberIn(row, 'bl91_obliquity_deg'),
+      perihelionLongitudeDeg: numberIn(row, 'bl91_perihelion_deg'),
+    };
+    const midsummer = (of: typeof orbit) => dailyInsolation(65, 90, of, 1361).dailyMeanWm2;
+    expect(Math.abs(midsummer(orbit) - numberIn(row, 'q65N_jun_b78_W_m2_S0_1361')), age).toBeLessThan(1e-4);
+    expect(Math.abs(midsummer(printed) - numberIn(row, 'q65N_jun_bl91_W_m2_S0_1361')), age).toBeLessThan(
+      1e-4,
+    );
   }
 });
 

@@ -19,12 +19,13 @@ function contact(seed: number, y: number, x0: number, x1: number, back = false):
   return (back ? xs.reverse() : xs).map((x) => `${x.toFixed(1)} ${(y + wave(seed, x)).toFixed(1)}`).join('L');
 }
 
+/** A lens: two curves that meet in points at the left and right. */
 function lensOutline(bed: Bed, x0: number, x1: number): string {
-  const top = bed.topPx + 3;
-  const bottom = bed.topPx + bed.heightPx - 3;
-  const middle = (top + bottom) / 2;
-  const full = `${x1 - 4} ${top} ${x1} ${top + 2} ${x1} ${middle}`;
-  return `M${x0} ${middle}C${x0} ${top + 2} ${x0 + 4} ${top} ${(x0 + x1) / 2} ${top}S${full}S${x1 - 4} ${bottom} ${(x0 + x1) / 2} ${bottom}S${x0} ${bottom - 2} ${x0} ${middle}Z`;
+  const middle = bed.topPx + bed.heightPx / 2;
+  const reach = ((bed.heightPx - 6) / 2) * (4 / 3); // a cubic goes three quarters of the way to its handles
+  const [from, to] = [x0 + 3, x1 - 3];
+  const curve = (y: number, a: number, b: number, end: number) => `C${a} ${y} ${b} ${y} ${end} ${middle}`;
+  return `M${x0} ${middle}${curve(middle - reach, from, to, x1)}${curve(middle + reach, to, from, x0)}Z`;
 }
 
 /** The rock: beds with shared wavy contacts, lenses in a second lane, an unconformity above deep time. */
@@ -61,10 +62,7 @@ export function StrataDrawing({ layout, selected, leftPx, rightPx, limitWm2, mod
           <path key="on" d={outline(bed)} className="bed-on" />
         ))}
       {unconformityPx !== null && (
-        <path
-          d={`M${leftPx - 6} ${unconformityPx}q4 -5 8 0t8 0 8 0 8 0 8 0`}
-          className="unconformity"
-        />
+        <path d={`M${leftPx - 6} ${unconformityPx}q4 -5 8 0t8 0 8 0 8 0 8 0`} className="unconformity" />
       )}
     </svg>
   );
@@ -108,7 +106,13 @@ function BedShape({ bed, path, clip, seed, fromPx, rightPx, limitWm2, mode }: Sh
         </>
       )}
       {bed.slice.stale && (
-        <rect x={rightPx + 2.5} y={bed.topPx + 3} width={3} height={bed.heightPx - 6} className="stale-rule" />
+        <rect
+          x={rightPx + 2.5}
+          y={bed.topPx + 3}
+          width={3}
+          height={bed.heightPx - 6}
+          className="stale-rule"
+        />
       )}
     </g>
   );

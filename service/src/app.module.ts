@@ -3,6 +3,7 @@ import { APP_INTERCEPTOR, APP_PIPE } from '@nestjs/core';
 import { ScheduleModule } from '@nestjs/schedule';
 import { AuthModule } from './auth/auth.module';
 import { BackdropsModule } from './backdrops/backdrops.module';
+import { CalculatorsModule } from './calculators/calculators.module';
 import { ConfigModule } from './config/config.module';
 import type { Settings } from './config/settings';
 import { DatabaseModule } from './database/database.module';
@@ -35,6 +36,7 @@ export class AppModule {
         ScheduleModule.forRoot(),
         AuthModule,
         BackdropsModule,
+        CalculatorsModule,
         DatasetsModule,
         FieldsModule,
         FilesModule,

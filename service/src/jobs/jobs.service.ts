@@ -88,7 +88,7 @@ export class JobsService {
       : null;
     if (same) return summaryOf(same);
     const row = await this.rows.create(
-      { ...wanted, dedupeKey: dedupeKey ?? null, state: 'queued' },
+      { ...wanted, payload: wanted.payload ?? {}, dedupeKey: dedupeKey ?? null, state: 'queued' },
       { transaction },
     );
     transaction.afterCommit(() => this.runner.wake());

@@ -4,10 +4,11 @@ import type { Archive } from './samples';
 /** Looks up the present-day land share of the 2° cell of a position. */
 export type LandShare = (latitudeDeg: number, longitudeDeg: number) => number;
 
-/** Decodes the table once for a run of a rule. Longitudes of −180 to 360° are taken; the poles belong to the last row. */
+/** Decodes the table at the first look-up of a run. Longitudes of −180 to 360° are taken; the poles belong to the last row. */
 export function landShare(): LandShare {
-  const fractions = landFraction2Deg();
+  let fractions: Float64Array | undefined;
   return (latitudeDeg, longitudeDeg) => {
+    fractions ??= landFraction2Deg();
     const row = Math.min(LAND_FRACTION_ROWS - 1, Math.max(0, Math.floor((latitudeDeg + 90) / 2)));
     const eastward = (((longitudeDeg + 180) % 360) + 360) % 360;
     return fractions[row * LAND_FRACTION_COLUMNS + Math.floor(eastward / 2)]!;

@@ -1,4 +1,4 @@
-import { greatCircleKm } from '../sphere/great-circle';
+import { EARTH_RADIUS_M, RADIANS } from '../physical/constants';
 import type { VettingContext } from './context';
 import { onGlobe } from './land';
 import { groupBy } from './place';
@@ -25,6 +25,7 @@ const BAND_DEG = 10;
  */
 export function neighbouredSites(context: VettingContext, radiusKm: number): NeighbouredSite[] {
   const sites = sitesOf(context).flatMap((site) => withFlux(context, site));
+  const cosRadius = Math.cos((radiusKm * 1000) / EARTH_RADIUS_M);
   const cells = groupBy(sites, (one) =>
     cellKey(one.archive, bandOf(one.site), columnOf(one.site, bandOf(one.site))),
   );
@@ -33,7 +34,7 @@ export function neighbouredSites(context: VettingContext, radiusKm: number): Nei
     const near = [...cellsAround(one.site)].flatMap(
       ([band, column]) => cells.get(cellKey(one.archive, band, column)) ?? [],
     );
-    const neighbours = near.filter((other) => other !== one && distanceKm(one.site, other.site) <= radiusKm);
+    const neighbours = near.filter((other) => other !== one && cosineBetween(one, other) >= cosRadius);
     return {
       site: one.site,
       log10Flux: one.log10Flux,
@@ -42,7 +43,15 @@ export function neighbouredSites(context: VettingContext, radiusKm: number): Nei
   });
 }
 
-type SiteFlux = { site: Site; archive: string; log10Flux: number };
+interface SiteFlux {
+  site: Site;
+  archive: string;
+  log10Flux: number;
+  /** unit vector of the position: distances of many pairs then cost three products each */
+  x: number;
+  y: number;
+  z: number;
+}
 
 function withFlux(context: VettingContext, site: Site): SiteFlux[] {
   const archive = archiveOf(context, site.rows[0]!);
@@ -50,7 +59,9 @@ function withFlux(context: VettingContext, site: Site): SiteFlux[] {
   const positive = fluxes.filter((flux) => flux > 0).sort((a, b) => a - b);
   const median = positive[Math.floor(positive.length / 2)];
   if (archive === null || median === undefined || !onGlobe(site.latitudeDeg, site.longitudeDeg)) return [];
-  return [{ site, archive, log10Flux: Math.log10(median) }];
+  const [phi, lambda] = [site.latitudeDeg * RADIANS, site.longitudeDeg * RADIANS];
+  const [x, y] = [Math.cos(phi) * Math.cos(lambda), Math.cos(phi) * Math.sin(lambda)];
+  return [{ site, archive, log10Flux: Math.log10(median), x, y, z: Math.sin(phi) }];
 }
 
 const thinned = (cell: SiteFlux[]): SiteFlux[] => {
@@ -58,15 +69,14 @@ const thinned = (cell: SiteFlux[]): SiteFlux[] => {
   return stride === 1 ? cell : cell.filter((_, index) => index % stride === 0);
 };
 
-const distanceKm = (a: Site, b: Site): number =>
-  greatCircleKm([a.longitudeDeg, a.latitudeDeg], [b.longitudeDeg, b.latitudeDeg]);
+const cosineBetween = (a: SiteFlux, b: SiteFlux): number => a.x * b.x + a.y * b.y + a.z * b.z;
 
 const bandOf = (site: Site): number => Math.min(17, Math.floor((site.latitudeDeg + 90) / BAND_DEG));
 
 /** Cells of a band, each at least as wide as the band is high at its edge nearer to a pole; one for the polar caps. */
 function columnsOf(band: number): number {
   const poleward = Math.max(Math.abs(band * BAND_DEG - 90), Math.abs((band + 1) * BAND_DEG - 90));
-  return Math.max(1, Math.floor((360 / BAND_DEG) * Math.cos((poleward * Math.PI) / 180)));
+  return Math.max(1, Math.floor((360 / BAND_DEG) * Math.cos(poleward * RADIANS)));
 }
 
 const columnOf = (site: Site, band: number): number =>

@@ -67,12 +67,19 @@ export function* distinctCells(
   const seen = new Set<string>();
   for (const row of rows) {
     const traced = row.cells[field];
-    const source = traced ? (traced.cell ?? 'form') : `row ${row.row}`;
-    const key = `${row.sheet}\u0000${source}\u0000${traced?.raw ?? ''}`;
-    if (seen.has(key)) continue;
-    seen.add(key);
+    if (traced && !isOwnCell(row, traced.cell)) {
+      const key = `${row.sheet}\u0000${traced.cell ?? 'form'}\u0000${traced.raw}`;
+      if (seen.has(key)) continue;
+      seen.add(key);
+    }
     yield { row, traced };
   }
+}
+
+/** Whether a cell stands in the row's own line, so that no other row shares it: "F7" in row 7, not in row 17. */
+function isOwnCell(row: SampleRow, cell: string | null): boolean {
+  const line = String(row.row);
+  return cell !== null && cell.endsWith(line) && !(cell.charCodeAt(cell.length - line.length - 1) < 65);
 }
 
 /** Rows by sheet, sheets in the order they come. */

@@ -192,7 +192,7 @@ export function opticalDepth(
       fluxGM2Yr: null,
       fluxSigmaGM2Yr: null,
       cells: {
-        ...Object.fromEntries(made.map(([field, value]) => [field, { value: value as number | string }])),
+        ...Object.fromEntries(made.map(([field, value]) => [field, { value: value }])),
         ...(cells as Record<string, Partial<TracedValue>> | undefined),
       },
     });

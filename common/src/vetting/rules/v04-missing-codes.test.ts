@@ -14,12 +14,12 @@ examplesOf(missingCodes, {
         severity: 'warning',
         row: null,
         field: 'fluxGM2Yr',
-        message: expect.stringContaining('3 cells') as unknown as string,
+        message: expect.stringContaining('3 cells'),
       },
     },
     'a value is below detection': {
       context: context(rows({ cells: { fluxGM2Yr: { raw: '<0.01', value: 0.01, belowDetection: true } } })),
-      first: { message: expect.stringContaining('below detection 1 ×') as unknown as string },
+      first: { message: expect.stringContaining('below detection 1 ×') },
     },
   },
 });

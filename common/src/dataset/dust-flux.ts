@@ -96,7 +96,7 @@ export const dustFlux: DatasetKind = {
       canonicalUnit: 'g m-2 yr-1',
       required: true,
       headings: ['dust flux', 'dust mass flux', 'dust deposition', 'dust deposition flux', 'dust deposition rate', 'dust mar', 'dust mass accumulation rate', 'dust accumulation rate', 'mineral dust flux', 'eolian flux', 'aeolian flux', 'eolian mar', 'lithogenic flux', 'terrigenous flux', 'detrital flux', 'dust flux mean', 'mean dust flux', 'loess mar', 'mar', 'mass accumulation rate', 'flux', 'deposition', 'deposition flux', 'staubfluss', 'staub fluss', 'staubdeposition', 'staubeintrag', 'fluss', 'massenakkumulationsrate', 'depositionsrate', 'flux de poussiere', 'flux de poussieres', 'depot de poussiere', 'flujo de polvo', 'flujo', 'deposicion de polvo', 'flusso di polvere', 'fluxo de poeira', 'stofflux', 'stoftflode', 'поток пыли'],
-      min: 0,
+      // No lower bound: differences such as nssCa can be slightly negative; a vetting rule judges the sign.
       max: 1e5,
       help: 'Mass of dust deposited per area and time. A proxy (calcium, iron …) keeps its own name.',
     },

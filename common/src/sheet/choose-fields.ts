@@ -90,7 +90,8 @@ function chooseFluxes(claims: Claim[], kind: DatasetKind): Claim[] {
 
 /** The best claim keeps a field. An uncertainty keeps its own only while the value it belongs to keeps its. */
 function oneColumnEach(claims: Claim[], kind: DatasetKind): Claim[] {
-  const severalFluxes = claims.filter((claim) => claim.field === kind.valueField).length > 1;
+  const severalFluxes =
+    claims.filter((claim) => claim.field === kind.valueField && claim.quantity).length > 1;
   const taken = new Map<string, Claim>();
   for (const claim of claims) {
     if (claim.field === null || (severalFluxes && isFluxPart(claim, kind))) continue;

@@ -75,7 +75,7 @@ export function sheetOfValues(name: string, values: (string | number | null)[][]
 const sheetOf = (name: string, rows: (RawCell | null)[][]): RawSheet => ({
   name,
   rows,
-  columnCount: Math.max(1, ...rows.map((row) => row.length)),
+  columnCount: rows.reduce((most, row) => Math.max(most, row.length), 1),
 });
 
 export interface ExpectedRow {

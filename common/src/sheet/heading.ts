@@ -23,8 +23,20 @@ export function looksLikeUnit(text: string): boolean {
   const trimmed = text.trim().replace(/^[[(]|[\])]$/g, '');
   if (trimmed === '' || trimmed.length > 40 || STATISTIC.test(trimmed) || /^\d+\s?\p{L}?$/u.test(trimmed))
     return false;
-  return !isUnitProblem(parseUnit(trimmed)) || !isUnitProblem(parseAgeUnit(trimmed));
+  return !isUnitProblem(parseUnit(trimmed)) || (isAgeText(trimmed) && !isUnitProblem(parseAgeUnit(trimmed)));
 }
+
+const AGE_WORDS = new Set(
+  'cal calibrated c bp b2k b 2k p k y r ka kyr kyrs ky kya yr yrs year years a ma myr my mya ann ce ad bce bc d e before present ago prior to the vor v heute n chr avant av antes de del an ans jc j jahr jahre jahren ano anos año años année années calendar million thousand tausend millionen'.split(
+    ' ',
+  ),
+);
+
+/** True when every word belongs to an age: "cal kyr BP", "a v. 1950"; a unit among other words is no unit text. */
+const isAgeText = (text: string): boolean =>
+  (text.toLowerCase().match(/\p{L}[\p{L}\d]*/gu) ?? []).every(
+    (word) => AGE_WORDS.has(word) || /^(?:k?yrs?|k?a)(?:bp|b2k)$/.test(word),
+  ) && !/[/^]/.test(text);
 
 /** A text in unit position that is meant as a unit though it is none that we know: it has a slash or a power. */
 const looksAttempted = (text: string): boolean => /\p{L}\s?\/|\p{L}\s?\^?[-−]\d|[⁻²³]/u.test(text);

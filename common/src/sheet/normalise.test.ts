@@ -96,11 +96,14 @@ describe('cells that are no plain numbers', () => {
     expect(row.fluxSigmaGM2Yr).toBeCloseTo(0.004, 12);
   });
 
-  test('a negative flux and a latitude of 95 are refused with a code and the range', () => {
-    const [row] = read(table('A;95.25;2.25;3.5;-0.02;', 'A;1.25;2.25;4.5;0.5;0.1')).rows;
-    expect(row!.cells.latitudeDeg?.problem?.code).toBe('outside-range');
-    expect(row!.cells.fluxGM2Yr?.problem).toMatchObject({ code: 'outside-range' });
-    expect(row!.cells.fluxGM2Yr?.problem?.message).toContain('0 to 100000 g m-2 yr-1');
+  test('a latitude of 95 and a dry bulk density of 9 are refused with a code and the range; a negative flux is left to vetting', () => {
+    const text =
+      'Site;Lat;Lon;Age (ka BP);Dust flux (g/m2/yr);Dry bulk density (g/cm3)\nA;95.25;2.25;3.5;-0.02;9';
+    const row = read(textWorkbook(text, ';')).rows[0]!;
+    expect(row.latitudeDeg).toBeNull();
+    expect(row.cells.latitudeDeg?.problem?.code).toBe('outside-range');
+    expect(row.cells.densityGCm3?.problem?.message).toContain('0.01 to 3 g cm-3');
+    expect(row.fluxGM2Yr).toBe(-0.02);
   });
 
   test('a unit in the cell counts for that cell', () => {

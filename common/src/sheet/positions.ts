@@ -7,15 +7,21 @@ import { isFilled, textOf } from './row-kind';
 
 /** Fields that people write once above the table instead of in a column. */
 const CONSTANT_FIELDS = ['site', 'latitudeDeg', 'longitudeDeg', 'elevationM', 'waterDepthM'];
+/** Rows counted from 1, `before` not among them. */
+export interface RowSpan {
+  from: number;
+  before: number;
+}
+
 const AXES: Record<string, Axis> = { latitudeDeg: 'latitude', longitudeDeg: 'longitude' };
 
 /**
  * Values that hold for a whole table, found as label and value in the rows above it ("Latitude | 75°06'S",
  * "lat | 75.1", "Elevation (m) | 3233", "Lat: 75.1 S"), or as a position in running text.
  */
-export function constantsAbove(sheet: RawSheet, beforeRow: number, kind: DatasetKind): TableConstant[] {
+export function constantsAbove(sheet: RawSheet, rows: RowSpan, kind: DatasetKind): TableConstant[] {
   const found = new Map<string, TableConstant>();
-  for (let r = 0; r < Math.min(beforeRow - 1, sheet.rows.length); r += 1) {
+  for (let r = rows.from - 1; r < Math.min(rows.before - 1, sheet.rows.length); r += 1) {
     const row = sheet.rows[r] ?? [];
     for (const [c, cell] of row.entries()) {
       if (!isFilled(cell)) continue;
@@ -142,8 +148,8 @@ const GENERIC_SHEET =
  * Site name where no column has it: the sheet's own name unless that is a general word, else the beginning of the
  * title above the table ("EPICA Dome C, dust flux …" → "EPICA Dome C").
  */
-export function siteName(sheet: RawSheet, beforeRow: number, isText: boolean): TableConstant | null {
-  const title = titleAbove(sheet, beforeRow);
+export function siteName(sheet: RawSheet, rows: RowSpan, isText: boolean): TableConstant | null {
+  const title = titleAbove(sheet, rows);
   const isGeneral = GENERIC_SHEET.test(sheet.name.replace(/([a-z])([A-Z])/g, '$1 $2'));
   if (!isText && !isGeneral) {
     return constant(
@@ -166,8 +172,8 @@ export function siteName(sheet: RawSheet, beforeRow: number, isText: boolean): T
   );
 }
 
-function titleAbove(sheet: RawSheet, beforeRow: number): { site: string; cell: string } | null {
-  for (let r = 0; r < Math.min(beforeRow - 1, sheet.rows.length); r += 1) {
+function titleAbove(sheet: RawSheet, rows: RowSpan): { site: string; cell: string } | null {
+  for (let r = rows.from - 1; r < Math.min(rows.before - 1, sheet.rows.length); r += 1) {
     const c = (sheet.rows[r] ?? []).findIndex(isFilled);
     if (c < 0) continue;
     const text = textOf(sheet.rows[r]?.[c]).replace(/^#+\s*/, '');

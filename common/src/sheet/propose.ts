@@ -1,23 +1,19 @@
 import type { DatasetKind } from '../dataset/field';
+import { missingCodeOf } from '../units/missing-code';
 import { chooseFields } from './choose-fields';
 import { columnHeadings } from './column-headings';
 import { findTables, type FoundTable } from './find-tables';
 import { columnLetter, type RawSheet, type RawWorkbook } from './grid';
-import type { ColumnProposal, Mapping, TableConstant, TableProposal } from './mapping';
-import { constantsAbove, positionInNotes, siteName } from './positions';
+import { assembleMapping, type Draft } from './assemble-mapping';
+import type { Mapping, TableProposal } from './mapping';
+import { positionInNotes } from './positions';
 import { type Claim, recogniseColumns } from './recognise-columns';
 import { isFilled, isNumberLike } from './row-kind';
 import { reasonToSetAside } from './set-aside';
-import { wavelengthInHeading } from './wavelength';
+import { tableConstants } from './table-constants';
 
 /** Rows looked at to tell a column of numbers from one of texts. */
 const ROWS_SAMPLED = 200;
-
-interface Draft {
-  table: TableProposal;
-  claims: Claim[];
-  constants: TableConstant[];
-}
 
 /**
  * Proposes how to read a workbook as a dataset kind: where its tables lie, which are used and why not, what each
@@ -30,21 +26,29 @@ export function proposeWorkbook(workbook: RawWorkbook, kind: DatasetKind): Mappi
   const found = new Map(workbook.sheets.map((sheet) => [sheet, findTables(sheet)]));
   const notesPosition = positionInNotes(workbook, (sheet) => (found.get(sheet) ?? []).length === 0);
   const drafts = workbook.sheets.flatMap((sheet) => draftsOf(sheet, found.get(sheet) ?? [], workbook, kind));
-  for (const draft of drafts) if (draft.table.used) completeConstants(draft, workbook, kind, notesPosition);
-  return assemble(drafts);
+  for (const draft of drafts) {
+    if (draft.table.used) draft.constants = tableConstants(draft, workbook, kind, notesPosition);
+  }
+  return assembleMapping(drafts);
 }
 
 function draftsOf(sheet: RawSheet, tables: FoundTable[], workbook: RawWorkbook, kind: DatasetKind): Draft[] {
-  if (tables.length === 0) return [{ table: notesOnly(sheet), claims: [], constants: [] }];
+  if (tables.length === 0)
+    return [{ table: notesOnly(sheet), claims: [], constants: [], span: null, general: null }];
   const drafts: Draft[] = [];
   for (const found of tables) {
     const headed = drafts.at(-1);
+    const span = {
+      from: headed === undefined ? 1 : headed.table.lastRow + 1,
+      before: found.headerRows[0] ?? found.firstRow,
+    };
+    const general = drafts[0]?.span ?? null;
     const continues =
       found.headerRows.length === 0 && headed !== undefined && headed.table.headerRows.length > 0;
     drafts.push(
       continues
         ? { ...headed, table: continued(sheet, found, headed.table) }
-        : draftOf(sheet, found, workbook, kind),
+        : { ...draftOf(sheet, found, workbook, kind), span, general },
     );
   }
   return drafts;
@@ -89,14 +93,14 @@ function draftOf(sheet: RawSheet, found: FoundTable, workbook: RawWorkbook, kind
     used: unusable === null,
     reason: unusable ?? reasonUsed(found, claims, kind),
   };
-  return { table, claims, constants: [] };
+  return { table, claims, constants: [], span: null, general: null };
 }
 
 function numberShare(sheet: RawSheet, { firstRow, lastRow }: FoundTable, index: number): number | undefined {
   let [filled, numbers] = [0, 0];
   for (let r = firstRow - 1; r < Math.min(lastRow, firstRow - 1 + ROWS_SAMPLED); r += 1) {
     const cell = sheet.rows[r]?.[index];
-    if (!isFilled(cell)) continue;
+    if (!isFilled(cell) || missingCodeOf(cell.text) !== null) continue;
     filled += 1;
     if (isNumberLike(cell)) numbers += 1;
   }
@@ -108,7 +112,11 @@ const SUBSTITUTES = [['concentrationNgG'], ['densityGCm3', 'sedimentationRateCmK
 
 function reasonNotUsable(claims: Claim[], found: FoundTable, kind: DatasetKind): string | null {
   if (found.headerRows.length === 0) return 'It has no header rows, so what its columns hold cannot be told.';
-  const fields = new Set(claims.map((claim) => claim.field));
+  const fields = new Set(
+    claims
+      .filter((claim) => claim.field === kind.valueField || claim.heading.unit !== null)
+      .map((claim) => claim.field),
+  );
   if (fields.has(kind.valueField)) return null;
   if (kind.id === 'dust-flux' && SUBSTITUTES.some((wanted) => wanted.every((field) => fields.has(field))))
     return null;
@@ -128,92 +136,4 @@ function reasonUsed(found: FoundTable, claims: Claim[], kind: DatasetKind): stri
       ? `"${value.map((claim) => claim.heading.text).join('", "')}" in column ${value.map((claim) => columnLetter(claim.heading.index)).join(', ')}`
       : 'what a flux can be computed from';
   return `Rows ${found.firstRow}–${found.lastRow} under the header row${found.headerRows.length > 1 ? 's' : ''} ${found.headerRows.join(', ')}${units}, with ${what}.`;
-}
-
-function completeConstants(
-  draft: Draft,
-  workbook: RawWorkbook,
-  kind: DatasetKind,
-  notes: ReturnType<typeof positionInNotes>,
-): void {
-  const sheet = workbook.sheets.find((one) => one.name === draft.table.sheet);
-  if (!sheet) return;
-  const beforeRow = draft.table.headerRows[0] ?? draft.table.firstRow;
-  const mapped = new Set(draft.claims.map((claim) => claim.field));
-  const offered = constantsAbove(sheet, beforeRow, kind);
-  const has = (field: string): boolean =>
-    mapped.has(field) || offered.some((constant) => constant.field === field);
-  if (!has('site')) {
-    const site = siteName(sheet, beforeRow, ['csv', 'tsv', 'txt'].includes(workbook.format));
-    if (site) offered.push(site);
-  }
-  if (notes && !has('latitudeDeg') && !has('longitudeDeg')) {
-    const reason = `The one position named in the notes of sheet "${notes.sheet}".`;
-    offered.push({
-      sheet: sheet.name,
-      field: 'latitudeDeg',
-      text: notes.pair[0],
-      unit: '°',
-      cell: null,
-      reason,
-    });
-    offered.push({
-      sheet: sheet.name,
-      field: 'longitudeDeg',
-      text: notes.pair[1],
-      unit: '°',
-      cell: null,
-      reason,
-    });
-  }
-  if (kind.valueField === 'aod' && !has('wavelengthNm')) {
-    const wavelength = wavelengthInHeading(draft.claims, draft.table);
-    if (wavelength) offered.push(wavelength);
-  }
-  draft.constants = offered.filter((constant) => !mapped.has(constant.field));
-}
-
-/** One list of columns for each sheet; where tables of one sheet differ, each column says to which it belongs. */
-function assemble(drafts: Draft[]): Mapping {
-  const mapping: Mapping = { tables: drafts.map((draft) => draft.table), columns: [], constants: [] };
-  for (const [index, draft] of drafts.entries()) {
-    const siblings = drafts.filter((other) => other.table.sheet === draft.table.sheet);
-    const wanted = draft.table.used || !siblings.some((other) => other.table.used);
-    const isFirstAlike =
-      siblings.find((other) => layout(other) === layout(draft) && other.table.used === draft.table.used) ===
-      draft;
-    if (!wanted || !isFirstAlike) continue;
-    const differs = siblings.some((other) => other.table.used && layout(other) !== layout(draft));
-    const mark = differs ? { table: index } : {};
-    mapping.columns.push(
-      ...draft.claims
-        .filter(isWorthListing)
-        .map((claim) => ({ ...column(claim, draft.table.sheet), ...mark })),
-    );
-    mapping.constants.push(...draft.constants.map((constant) => ({ ...constant, ...mark })));
-  }
-  return mapping;
-}
-
-const layout = (draft: Draft): string =>
-  JSON.stringify([
-    draft.claims.map((claim) => [claim.heading.text, claim.field, claim.heading.unit]),
-    draft.constants.map((one) => [one.field, one.text]),
-  ]);
-
-const isWorthListing = (claim: Claim): boolean =>
-  claim.field !== null || claim.heading.text !== '' || claim.heading.unit !== null;
-
-function column(claim: Claim, sheet: string): ColumnProposal {
-  const { heading, field, confidence, reason, quantity } = claim;
-  return {
-    sheet,
-    column: columnLetter(heading.index),
-    heading: heading.text,
-    field,
-    unit: heading.unit,
-    confidence: Math.min(1, confidence),
-    reason,
-    ...(field !== null && quantity !== undefined ? { quantity } : {}),
-  };
 }

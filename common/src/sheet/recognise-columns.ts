@@ -4,6 +4,7 @@ import { parseAgeUnit } from '../units/age';
 import { convertTo, UNIT_KINDS, type UnitKind } from '../units/convert';
 import { isUnitProblem } from '../units/unit';
 import type { ColumnHeading } from './column-headings';
+import { wavelengthNmIn } from './wavelength-in-heading';
 import { type Uncertainty, uncertaintyOf } from './heading';
 
 /** What one column may be. Several columns may claim one field; the best claim is chosen later. */
@@ -65,6 +66,7 @@ function claimValue(heading: ColumnHeading, kind: DatasetKind, numberShare: Numb
   }
   const best = claims[0];
   if (!best) return byUnitAlone(heading, kind, share);
+  if (best.field.field === 'aod') best.score *= wavelengthWeight(heading.text, share);
   const claim: Claim = {
     heading,
     field: best.field.field,
@@ -74,6 +76,13 @@ function claimValue(heading: ColumnHeading, kind: DatasetKind, numberShare: Numb
   return best.field.quantity === 'massFlux' && best.field.field === kind.valueField
     ? { ...claim, quantity: tracer ?? 'dust' }
     : claim;
+}
+
+/** Of several wavelengths the one with values and nearest to 550 nm is taken, for there optical depths are compared. */
+function wavelengthWeight(heading: string, share: number | undefined): number {
+  const wavelength = wavelengthNmIn(heading);
+  const nearness = wavelength === null ? 1 : 1 - Math.min(0.3, Math.abs(wavelength - 550) / 5000);
+  return nearness * (share === undefined ? 0.5 : 1);
 }
 
 /** A flux or concentration of calcium, iron … : kept under its own name, imported only where no dust flux is given. */

@@ -1,6 +1,5 @@
 import { missingCodeOf } from '../units/missing-code';
 import type { RawCell } from './grid';
-import { headingKey } from './heading';
 
 /** One row of a sheet, counted: what decides whether it holds data, headings, totals or prose. */
 export interface RowShape {
@@ -13,15 +12,16 @@ export interface RowShape {
 type Row = readonly (RawCell | null)[];
 
 const TOTALS = new Set(
-  'mean,average,avg,total,totals,sum,summe,gesamt,gesamtsumme,mittel,mittelwert,durchschnitt,moyenne,somme,total general,media,promedio,suma,somma,gemiddelde,totaal,min,max,minimum,maximum,median,mediane,std,stdev,standard deviation,s d,sd,count,n,standardabweichung,ecart type,geometric mean,grand total,subtotal,zwischensumme,sous total,overall'.split(
+  'mean,average,avg,total,totals,sum,summe,gesamt,gesamtsumme,mittel,mittelwert,durchschnitt,moyenne,somme,total general,total général,media,promedio,suma,somma,gemiddelde,totaal,min,max,minimum,maximum,median,mediane,std,stdev,standard deviation,sd,count,n,standardabweichung,ecart type,écart type,ecart-type,écart-type,geometric mean,grand total,subtotal,zwischensumme,sous total,overall'.split(
     ',',
   ),
 );
 const LABELS = new Set(
-  'latitude,lat,breite,latitud,latitudine,longitude,lon,long,lange,laenge,longitud,longitudine,elevation,altitude,hohe,coordinates,position,koordinaten,site,core,station'.split(
+  'latitude,lat,breite,latitud,latitudine,longitude,lon,long,länge,lange,laenge,longitud,longitudine,elevation,altitude,höhe,hoehe,hohe,coordinates,position,koordinaten,site,core,station'.split(
     ',',
   ),
 );
+const SIMPLE = /^-?\d+(?:[.,]\d+)?$/;
 const NUMBER =
   /^[<≤~]?\s*[+\-−]?(?:\d|[.,]\d)[\d.,' \u00a0\u202f]*(?:[eE][+-]?\d+)?(?:\s*(?:±|\+\/-).*)?[*†‡§#]*$/u;
 
@@ -31,7 +31,7 @@ export const isFilled = (cell: RawCell | null | undefined): cell is RawCell =>
 
 /** True for a stored number or a text that reads as one. */
 const isNumber = (cell: RawCell): boolean =>
-  cell.kind === 'number' || cell.kind === 'error' || NUMBER.test(cell.text.trim());
+  cell.kind === 'number' || cell.kind === 'error' || SIMPLE.test(cell.text) || NUMBER.test(cell.text.trim());
 
 /** A number, or a missing code, for it stands where a number would. */
 export const isNumberLike = (cell: RawCell): boolean => isNumber(cell) || missingCodeOf(cell.text) !== null;
@@ -65,13 +65,22 @@ function kindOf(
   return numbers + missing >= 2 && (numbers + missing) / filled >= 0.25 ? 'numbers' : 'some-numbers';
 }
 
-const isTotalsLabel = (text: string): boolean => TOTALS.has(headingKey(text));
+/** A label as compared: lower case, without a unit, dots or a colon. Plain, for it is asked of every row. */
+function labelKey(text: string): string {
+  if (text.length > 40) return '';
+  return text
+    .replace(/\s*[([].*$/, '')
+    .replace(/[.:=*]/g, '')
+    .trim()
+    .toLowerCase();
+}
+
+const isTotalsLabel = (text: string): boolean => TOTALS.has(labelKey(text));
 
 /** "Latitude | 75°06'S", "lat | 75.1": a label with its value to the right. */
 function hasLabel(row: Row): boolean {
   for (const [i, cell] of row.entries()) {
-    if (!isFilled(cell) || cell.kind !== 'text' || !LABELS.has(headingKey(cell.text.replace(/[([].*$/, ''))))
-      continue;
+    if (!isFilled(cell) || cell.kind !== 'text' || !LABELS.has(labelKey(cell.text))) continue;
     const next = row.slice(i + 1).find(isFilled);
     if (next && /\d/.test(next.text)) return true;
   }

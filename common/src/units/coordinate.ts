@@ -39,6 +39,8 @@ export function parseCoordinate(
   axis: Axis,
   options: CoordinateOptions = {},
 ): Coordinate | CoordinateProblem {
+  const simple = SIMPLE.test(text) ? valueOf(text.replace('-', ''), options.format) : null;
+  if (simple !== null) return withinRange(text.startsWith('-') ? -simple : simple, axis, text, 1);
   const plain = text
     .replace(/[º˚]/gu, '°')
     .normalize('NFKC')
@@ -73,6 +75,9 @@ export function parseCoordinate(
     (magnitude.negative || (hemisphere.kind === 'found' && hemisphere.negative) ? -1 : 1) * magnitude.degrees;
   return withinRange(signed, axis, text, magnitude.parts);
 }
+
+/** The common case, read without looking for hemispheres and minutes. */
+const SIMPLE = /^-?\d+(?:[.,]\d+)?$/;
 
 /** Range check and folding of a number of degrees. */
 export function foldCoordinate(degrees: number, axis: Axis): Coordinate | CoordinateProblem {

@@ -12,9 +12,12 @@ const NUMBERS = new Set([
   1e20, -1e34,
 ]);
 
+const LONGEST_CODE = 16;
+
 /** The code as a key for counting ("NaN", "-999", "" for an empty cell), or null when the text is none. */
 export function missingCodeOf(text: string): string | null {
   const trimmed = text.trim();
+  if (trimmed.length > LONGEST_CODE) return null;
   if (WORDS.has(trimmed.toLowerCase())) return trimmed;
   return /^-?\d/.test(trimmed) && isMissingNumber(Number(trimmed.replace(',', '.'))) ? trimmed : null;
 }

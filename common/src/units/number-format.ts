@@ -14,7 +14,8 @@ export const DECIMAL_POINT: NumberFormat = {
   reason: 'no decimal comma',
 };
 
-interface Evidence {
+/** Counts of telling and untelling numbers of a column. */
+export interface NumberEvidence {
   point: number;
   comma: number;
   pointThousands: number;
@@ -24,6 +25,7 @@ interface Evidence {
   other: '' | ' ' | "'";
 }
 
+const SIMPLE = /^-?(\d+)(?:([.,])(\d+))?$/;
 const NUMERIC = /^[<≤±~]?\s*[+-]?[\d.,' ]*\d[\d.,' ]*(?:[eE][+-]?\d+)?/u;
 
 /**
@@ -35,7 +37,11 @@ const NUMERIC = /^[<≤±~]?\s*[+-]?[\d.,' ]*\d[\d.,' ]*(?:[eE][+-]?\d+)?/u;
  * @param fileHint what the other columns of the same file decided; used only where the column is silent
  */
 export function decideNumberFormat(texts: Iterable<string>, fileHint?: '.' | ','): NumberFormat {
-  const evidence = gather(texts);
+  return formatOf(numberEvidence(texts), fileHint);
+}
+
+/** The decision from evidence gathered before, so that long columns are read once. */
+export function formatOf(evidence: NumberEvidence, fileHint?: '.' | ','): NumberFormat {
   const { point, comma, pointThousands, commaThousands, openPoint, openComma, other } = evidence;
   const forComma = comma + pointThousands;
   const forPoint = point + commaThousands;
@@ -68,7 +74,7 @@ export function decideNumberFormat(texts: Iterable<string>, fileHint?: '.' | ','
 function silent(
   openPoint: number,
   openComma: number,
-  other: Evidence['other'],
+  other: NumberEvidence['other'],
   hint?: '.' | ',',
 ): NumberFormat {
   if (openPoint === 0 && openComma === 0)
@@ -97,8 +103,8 @@ function silent(
   };
 }
 
-function gather(texts: Iterable<string>): Evidence {
-  const seen: Evidence = {
+export function numberEvidence(texts: Iterable<string>): NumberEvidence {
+  const seen: NumberEvidence = {
     point: 0,
     comma: 0,
     pointThousands: 0,
@@ -108,6 +114,7 @@ function gather(texts: Iterable<string>): Evidence {
     other: '',
   };
   for (const text of texts) {
+    if (weighSimple(text, seen)) continue;
     const found = NUMERIC.exec(
       text
         .trim()
@@ -127,7 +134,19 @@ function gather(texts: Iterable<string>): Evidence {
   return seen;
 }
 
-function weigh(digits: string, seen: Evidence): void {
+/** The common case, without the work of the general one: digits with at most one sign. */
+function weighSimple(text: string, seen: NumberEvidence): boolean {
+  const found = SIMPLE.exec(text);
+  if (!found) return false;
+  const [, whole = '', sign, fraction = ''] = found;
+  if (sign === undefined) return true;
+  const open = fraction.length === 3 && whole.length <= 3 && whole !== '0';
+  if (sign === '.') seen[open ? 'openPoint' : 'point'] += 1;
+  else seen[open ? 'openComma' : 'comma'] += 1;
+  return true;
+}
+
+function weigh(digits: string, seen: NumberEvidence): void {
   const space = /\d([ '])\d{3}(?!\d)/.exec(digits);
   if (space) seen.other = space[1] as ' ' | "'";
   const points = digits.split('.').length - 1;

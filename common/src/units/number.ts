@@ -1,4 +1,4 @@
-import { missingCodeOf } from './missing-code';
+import { isMissingNumber, missingCodeOf } from './missing-code';
 import { type NumberFormat } from './number-format';
 
 /** What one cell's text says. `value` null: missing, below detection without a limit, or unreadable (then `problem`). */
@@ -17,6 +17,8 @@ export interface NumberReading {
   problem?: { code: string; message: string };
 }
 
+const SIMPLE_POINT = /^-?\d+(?:\.\d+)?$/;
+const SIMPLE_COMMA = /^-?\d+(?:,\d+)?$/;
 const BELOW_WORDS =
   /^(?:<\s*)?(?:b\.?\s?d\.?\s?l\.?|l\.?o\.?d\.?|d\.?l\.?|below detection(?: limit)?|u\.?\s?n\.?\s?g\.?|unter nachweisgrenze|n\.?\s?n\.?)$/i;
 const FOOTNOTE = /\s*([*†‡§¶#]+|\^?[¹²³⁴⁵⁶⁷⁸⁹]+)$/u;
@@ -29,6 +31,8 @@ const NUMBER =
  * A text that the format does not allow is a problem, never a guess.
  */
 export function readNumber(text: string, format: NumberFormat): NumberReading {
+  const simple = simpleNumber(text, format);
+  if (simple !== null) return { value: simple };
   const plain = plainNumberText(text);
   const missing = missingCodeOf(plain);
   if (missing !== null) return { value: null, missing: text.trim() };
@@ -41,6 +45,14 @@ export function readNumber(text: string, format: NumberFormat): NumberReading {
   const halves = plain.split(/\s*(?:±|\+\/-|\+-)\s*/u);
   if (halves.length === 2) return withPlusMinus(text, halves[0] ?? '', halves[1] ?? '', format);
   return readPlain(text, plain, format);
+}
+
+/** The common case, without the work of the general one: digits with at most the decimal sign of the column. */
+function simpleNumber(text: string, { decimalSign, undecided }: NumberFormat): number | null {
+  const isSimple = decimalSign === '.' ? SIMPLE_POINT.test(text) : SIMPLE_COMMA.test(text);
+  if (!isSimple || undecided) return null;
+  const value = Number(decimalSign === '.' ? text : text.replace(',', '.'));
+  return isMissingNumber(value) ? null : value + 0;
 }
 
 function plainNumberText(text: string): string {

@@ -1,0 +1,47 @@
+import { expect, test } from 'vitest';
+import { DATASET_KINDS } from '../dataset/kinds';
+import { DomainError } from '../physical/domain-error';
+import { textWorkbook } from './fixtures.test-support';
+import { normaliseWorkbook } from './normalise';
+import { proposeWorkbook } from './propose';
+import { templateFor } from './templates';
+
+test.each(DATASET_KINDS.map((kind) => [kind.id, kind] as const))(
+  'the template for %s is read back with every column recognised',
+  (_id, kind) => {
+    const { rows } = templateFor(kind);
+    const workbook = textWorkbook(rows.map((row) => row.join(',')).join('\n'));
+    const mapping = proposeWorkbook(workbook, kind);
+    expect(mapping.tables[0]).toMatchObject({
+      used: true,
+      headerRows: [1, 2],
+      unitsRow: 2,
+      firstRow: 3,
+      lastRow: 4,
+    });
+    expect(mapping.columns.filter((column) => column.field === null)).toEqual([]);
+    const { rows: samples } = normaliseWorkbook(workbook, kind, mapping);
+    expect(samples.length).toBe(2);
+    expect(samples[0]!.cells[kind.valueField]?.value).toBeGreaterThan(0);
+    expect(samples.flatMap((sample) => Object.values(sample.cells).filter((cell) => cell.problem))).toEqual(
+      [],
+    );
+  },
+);
+
+test('every field of a kind can stand in a template and is recognised by its own heading', () => {
+  for (const kind of DATASET_KINDS) {
+    const wanted = kind.fields.map((field) => field.field);
+    const { rows, notes } = templateFor(kind, wanted);
+    expect(notes.length).toBe(wanted.length);
+    const filled = wanted.map((field) =>
+      kind.fields.find((one) => one.field === field)?.quantity === 'text' ? 'text' : '1',
+    );
+    const workbook = textWorkbook([rows[0], rows[1], filled, filled].map((row) => row!.join(',')).join('\n'));
+    expect(proposeWorkbook(workbook, kind).columns.map((column) => column.field)).toEqual(wanted);
+  }
+});
+
+test('a field that the kind does not have is refused by name', () => {
+  expect(() => templateFor(DATASET_KINDS[0]!, ['pollen'])).toThrow(DomainError);
+});

@@ -1,0 +1,82 @@
+import type { DatasetKind, FieldDeclaration } from '../dataset/field';
+import { DomainError } from '../physical/domain-error';
+
+/** Spelling of units in templates where the canonical one would not be plain to a contributor. */
+const UNIT_SHOWN: Record<string, string> = { '1': 'fraction' };
+
+/** Invented values of the two example rows, by field; plainly no measurement. */
+const EXAMPLES: Record<string, [string, string]> = {
+  site: ['Example core', 'Example core'],
+  latitudeDeg: ['-12.34', '-12.34'],
+  longitudeDeg: ['56.78', '56.78'],
+  ageKaBp: ['20.5', '21.5'],
+  fluxGM2Yr: ['1.25', '1.5'],
+  fluxSigmaGM2Yr: ['0.15', '0.2'],
+  aod: ['0.12', '0.15'],
+  aodSigma: ['0.02', '0.02'],
+  wavelengthNm: ['550', '550'],
+  remark: ['example: delete this row', 'example: delete this row'],
+};
+
+export interface Template {
+  fileName: string;
+  /** heading row, units row, example rows */
+  rows: string[][];
+  /** one line a field, for a notes sheet or a text file beside the table */
+  notes: string[];
+}
+
+/**
+ * A table to fill in for a dataset kind: headings and units as `proposeWorkbook` recognises them with certainty,
+ * two invented example rows that say so, and notes on every column.
+ *
+ * @throws DomainError `no-such-field` when a wanted field is not of the kind
+ */
+export function templateFor(kind: DatasetKind, wanted: string[] = usualFields(kind)): Template {
+  const fields = wanted.map((name) => {
+    const field = kind.fields.find((one) => one.field === name);
+    if (!field)
+      throw new DomainError('no-such-field', {
+        field: 'field',
+        value: name,
+        allowed: kind.fields.map((one) => one.field),
+      });
+    return field;
+  });
+  return {
+    fileName: `siltlight-${kind.id}-template.csv`,
+    rows: [
+      fields.map((field) => headingOf(field)),
+      fields.map((field) => unitOf(field)),
+      ...[0, 1].map((row) => fields.map((field) => EXAMPLES[field.field]?.[row] ?? '')),
+    ],
+    notes: fields.map((field) => noteOf(field, kind)),
+  };
+}
+
+const usualFields = (kind: DatasetKind): string[] =>
+  kind.fields
+    .filter(
+      (field) =>
+        field.required ||
+        field.field in EXAMPLES ||
+        ['ageSigmaKa', 'depthTopM', 'depthBaseM', 'elevationM'].includes(field.field),
+    )
+    .map((field) => field.field);
+
+/** The first synonym, which recognition takes as certain. */
+const headingOf = (field: FieldDeclaration): string => {
+  const heading = field.headings[0] ?? field.title;
+  return heading.charAt(0).toUpperCase() + heading.slice(1);
+};
+
+const unitOf = ({ canonicalUnit }: FieldDeclaration): string => UNIT_SHOWN[canonicalUnit] ?? canonicalUnit;
+
+function noteOf(field: FieldDeclaration, kind: DatasetKind): string {
+  const range =
+    field.min === undefined && field.max === undefined
+      ? ''
+      : ` Range ${field.min ?? '…'} to ${field.max ?? '…'}.`;
+  const need = field.required ? 'Required. ' : field.field === kind.sigmaField ? 'Wanted. ' : '';
+  return `${headingOf(field)}: ${need}${field.help}${range}`;
+}

@@ -1,29 +1,73 @@
 import { expect, test } from 'vitest';
-import { readCsv } from '../../../reference/read';
-import { context, row } from './rules/rows.test-support';
-import { vet } from './vet';
+import { datasetKind } from '../dataset/kinds';
+import { sampleText, sampleWorkbook } from '../sheet/fixtures.test-support';
+import type { RawWorkbook } from '../sheet/grid';
+import { normaliseWorkbook } from '../sheet/normalise';
+import { proposeWorkbook } from '../sheet/propose';
+import type { VettingContext } from './context';
+import { answers } from './rules/rows.test-support';
+import { counts, vet } from './vet';
 
-/** Rows that should come out of the shipped sample files, on one sheet a site as contributors send them. */
-function rowsOf(name: string) {
-  return readCsv(name).map((line, index) =>
-    row({
-      sheet: line.site!,
-      row: index + 2,
-      site: line.site!,
-      latitudeDeg: Number(line.lat),
-      longitudeDeg: Number(line.lon),
-      ageKaBp: Number(line.age_ka_BP),
-      fluxGM2Yr: Number(line.flux_g_m2_yr),
-      fluxSigmaGM2Yr: Number(line.uncertainty_g_m2_yr),
-    }),
-  );
+const dust = datasetKind('dust-flux');
+
+/** A file as a contributor drops it, with the proposal unchanged. */
+function submission(workbook: RawWorkbook, changes: Partial<VettingContext> = {}): VettingContext {
+  const mapping = proposeWorkbook(workbook, dust);
+  const { rows, missingCodes } = normaliseWorkbook(workbook, dust, mapping);
+  return {
+    ...{ workbook, mapping, rows, missingCodes, metadata: answers },
+    ...{ formOffered: true, heldSites: [], limits: {} },
+    ...changes,
+  };
 }
 
-test.each(['samples/A_expected.csv', 'samples/B_expected.csv'])(
-  'the rows of %s pass with no error once the form is answered, and lie within the limits for ice',
-  (name) => {
-    const findings = vet(context(rowsOf(name)));
-    expect(findings.filter(({ severity }) => severity === 'error')).toEqual([]);
-    expect(findings.filter(({ code }) => ['V07', 'V12', 'V32', 'V33'].includes(code))).toEqual([]);
-  },
-);
+const iceCores = () => sampleWorkbook('A_EDC_NGRIP_dust_v3_final.xlsx');
+const germanExport = () => sampleText('B_Staubfluesse_Export.csv', ';', 'latin1');
+
+test.each([
+  ['the ice-core workbook', iceCores],
+  ['the German text export', germanExport],
+])('%s passes without error once the form is answered, its fluxes within the limits for ice', (_, read) => {
+  const findings = vet(submission(read()));
+  expect(findings.filter(({ severity }) => severity === 'error')).toEqual([]);
+  expect(findings.filter(({ code }) => ['V07', 'V12', 'V32', 'V33', 'V37'].includes(code))).toEqual([]);
+});
+
+test.each([
+  ['the ice-core workbook', iceCores],
+  ['the German text export', germanExport],
+])('%s is not blocked either when it is checked without a form', (_, read) => {
+  const findings = vet(submission(read(), { metadata: {}, formOffered: false }));
+  expect(findings.filter(({ severity }) => severity === 'error')).toEqual([]);
+});
+
+test('an unanswered form is asked for archive, reference, dust definition, size cut-off and licence only', () => {
+  const findings = vet(submission(iceCores(), { metadata: {} }));
+  const wanted = findings.filter(({ severity }) => severity === 'error').map(({ field }) => field);
+  expect([...wanted].sort()).toEqual([
+    'archive',
+    'dustDefinition',
+    'licence',
+    'publicationDoi',
+    'sizeCutoff',
+  ]);
+});
+
+test('rows without a flux are noted row by row and once a sheet, and the codes once a column', () => {
+  const context = submission(germanExport());
+  const findings = vet(context);
+  expect(counts(context, findings)).toMatchObject({ rows: 18, withoutValue: 1, errors: 0 });
+  const notes = findings.filter(({ code }) => code === 'V05');
+  expect(notes.map(({ severity, row }) => [severity, row])).toEqual([
+    ['note', null],
+    ['note', 5],
+  ]);
+  const codes = findings.filter(({ code }) => code === 'V04').map(({ column }) => column);
+  expect(codes).toEqual(['E', 'F']);
+});
+
+test('tracer fluxes are kept under their name and warned of once a sheet and tracer', () => {
+  const findings = vet(submission(sampleWorkbook('wolff2006edc-chem.xls')));
+  const subjects = findings.filter(({ code }) => code === 'V43').map(({ subject }) => subject);
+  expect(new Set(subjects)).toEqual(new Set(['nssCa', 'Fe']));
+});

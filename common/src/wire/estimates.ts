@@ -62,6 +62,14 @@ export type BackdropView = z.infer<typeof backdropView>;
 
 /** Shortwave, longwave and net of one kind, sky and place. */
 export const forcingTriple = z.object({ shortwaveWm2: interval, longwaveWm2: interval, netWm2: interval });
+export type ForcingTriple = z.infer<typeof forcingTriple>;
+
+/** The same under a clear sky; a part is null where its efficiency belongs to all sky alone. */
+export const clearSkyTriple = z.object({
+  shortwaveWm2: interval.nullable(),
+  longwaveWm2: interval.nullable(),
+  netWm2: interval.nullable(),
+});
 
 export const estimateRegionResult = z.object({
   code: z.string(),
@@ -93,9 +101,12 @@ export const estimateResult = z.object({
   }),
   global: z.object({
     forcing: forcingTriple,
-    forcingClearSky: forcingTriple,
+    forcingClearSky: clearSkyTriple,
     directEffect: forcingTriple,
     directEffectReference: forcingTriple,
+    /** dust in the air behind the optical depths [Tg] */
+    burdenSliceTg: z.number(),
+    burdenReferenceTg: z.number(),
     opticalDepthSlice: z.number(),
     opticalDepthReference: z.number(),
   }),

@@ -39,7 +39,6 @@ export function buildField(given: FieldIngredients): FieldContent {
   const grid = opticalDepthGrid(base, lnRatios, scaling.global.lnRatio);
   const slice = areaMeans(grid.opticalDepthSlice);
   const reference = areaMeans(grid.opticalDepthReference);
-  const { tauSquared } = scaling.diagnostics;
   const byGlobal = areaByGlobalRatio(scaling);
   return {
     way: 'regional-scaling',
@@ -57,7 +56,7 @@ export function buildField(given: FieldIngredients): FieldContent {
     },
     regions: scaling.regions.map((region) => regionOf(region, slice.byRegion, reference.byRegion)),
     global: scaling.global,
-    sharedSe: Math.sqrt(Math.max(0, scaling.global.lnRatioSe ** 2 - tauSquared)),
+    sharedSe: scaling.sharedSe,
     sites: records.map((record) => siteOf(record, scaling)),
     diagnostics: { ...scaling.diagnostics, areaByGlobalRatioShare: byGlobal },
     globalOpticalDepthSlice: slice.global,

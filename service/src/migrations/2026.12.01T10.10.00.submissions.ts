@@ -28,22 +28,39 @@ export const up: Migration = async ({ context }) => {
     ) STRICT`);
   await run('CREATE INDEX submissions_by_contributor ON submissions (contributor_id, number)');
   await run('CREATE INDEX submissions_by_state ON submissions (state, submitted_at)');
-  const child = (name: string, columns: string) =>
+  const child = (name: string, columns: string, constraint = '') =>
     run(`
     CREATE TABLE ${name} (
       id            TEXT PRIMARY KEY,
       submission_id TEXT NOT NULL REFERENCES submissions (id),
       person_id     TEXT NOT NULL REFERENCES people (id),
       ${columns},
-      created_at    TEXT NOT NULL
+      created_at    TEXT NOT NULL${constraint}
     ) STRICT`);
   const cell = 'sheet TEXT NOT NULL, row INTEGER NOT NULL CHECK (row > 0), "column" TEXT NOT NULL';
-  await child('submission_corrections', `${cell}, raw_text TEXT NOT NULL, text TEXT NOT NULL, undone_at TEXT`);
-  await child('submission_left_out', 'sheet TEXT NOT NULL, row INTEGER NOT NULL, reason TEXT NOT NULL, UNIQUE (submission_id, sheet, row)');
-  await child('submission_waivers', 'finding_key TEXT NOT NULL, reason TEXT NOT NULL, UNIQUE (submission_id, finding_key)');
+  await child(
+    'submission_corrections',
+    `${cell}, raw_text TEXT NOT NULL, text TEXT NOT NULL, undone_at TEXT`,
+  );
+  await child(
+    'submission_left_out',
+    'sheet TEXT NOT NULL, row INTEGER NOT NULL, reason TEXT NOT NULL',
+    ', UNIQUE (submission_id, sheet, row)',
+  );
+  await child(
+    'submission_waivers',
+    'finding_key TEXT NOT NULL, reason TEXT NOT NULL',
+    ', UNIQUE (submission_id, finding_key)',
+  );
   await child('submission_queries', `${cell}, text TEXT NOT NULL`);
-  await child('submission_replies', 'query_id TEXT NOT NULL REFERENCES submission_queries (id), text TEXT NOT NULL');
-  await child('submission_decisions', "decision TEXT NOT NULL CHECK (decision IN ('approve', 'return', 'decline')), reason TEXT");
+  await child(
+    'submission_replies',
+    'query_id TEXT NOT NULL REFERENCES submission_queries (id), text TEXT NOT NULL',
+  );
+  await child(
+    'submission_decisions',
+    "decision TEXT NOT NULL CHECK (decision IN ('approve', 'return', 'decline')), reason TEXT",
+  );
   for (const name of ['corrections', 'left_out', 'waivers', 'queries', 'replies', 'decisions']) {
     await run(`CREATE INDEX submission_${name}_of ON submission_${name} (submission_id)`);
   }

@@ -15,7 +15,12 @@ export interface ReadLimits {
   cellCharacters: number;
   workbookCells: number;
   textCells: number;
+  /** processor time of the reading process: the same on a busy machine as on an idle one */
+  cpuSeconds: number;
+  /** time on the clock for workbooks, for a reader that waits for ever or a machine that is overrun */
   wallSeconds: number;
+  /** for text tables, which are streamed: their memory does not grow with them */
+  textWallSeconds: number;
   /** resident memory of the reading process, buffers included */
   residentBytes: number;
   /** the JavaScript heap alone, which does not bound buffers */
@@ -35,7 +40,9 @@ export const defaultLimits: Readonly<ReadLimits> = {
   cellCharacters: 32_767,
   workbookCells: 4_000_000,
   textCells: 12_000_000,
-  wallSeconds: 25,
+  cpuSeconds: 25,
+  wallSeconds: 60,
+  textWallSeconds: 120,
   residentBytes: 1792 * MIB,
   heapMiB: 1536,
 };

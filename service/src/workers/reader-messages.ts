@@ -14,6 +14,9 @@ export interface ReadRequest {
   text?: TextChoice;
 }
 
+export const wallSecondsOf = ({ container, limits }: ReadRequest): number =>
+  container === 'text' ? limits.textWallSeconds : limits.wallSeconds;
+
 export interface TextChoice {
   encoding?: TextEncoding;
   /** one character, or one of the two blank-separated layouts */

@@ -4,7 +4,7 @@ import { readFile } from 'node:fs/promises';
 import path from 'node:path';
 import type { RawWorkbook } from '@siltlight/common/sheet/grid';
 import { sizeInWords } from './limits';
-import type { ReaderMessage, ReadRequest } from './reader-messages';
+import { wallSecondsOf, type ReaderMessage, type ReadRequest } from './reader-messages';
 import { isRefusalCode, UploadRefused } from './upload-refused';
 import { WorkbookAssembly } from './workbook-assembly';
 import { damaged } from './zip-directory';
@@ -50,6 +50,7 @@ export async function runReader(request: ReadRequest, signal?: AbortSignal): Pro
 
 function outcomeOf(child: ChildProcess, request: ReadRequest, signal?: AbortSignal): Promise<RawWorkbook> {
   const { limits, fileName } = request;
+  const seconds = wallSecondsOf(request);
   const stops: (() => void)[] = [];
   const outcome = new Promise<RawWorkbook>((resolve, reject) => {
     const assembly = new WorkbookAssembly(request);
@@ -63,15 +64,12 @@ function outcomeOf(child: ChildProcess, request: ReadRequest, signal?: AbortSign
         else if (message.type === 'refused') reject(refusal(message));
         else assembly.add(message);
       } catch (cause) {
-        reject(cause as Error);
+        reject(cause instanceof Error ? cause : new Error(String(cause)));
       }
     });
     child.once('error', reject);
     child.once('close', (code, killedBy) => reject(deathOf(request, errors, code, killedBy)));
-    const clock = setTimeout(
-      () => reject(tookTooLong(fileName, limits.wallSeconds)),
-      limits.wallSeconds * 1000,
-    );
+    const clock = setTimeout(() => reject(tookTooLong(fileName, seconds)), seconds * 1000);
     const abort = (): void => reject(signal!.reason as Error);
     signal?.addEventListener('abort', abort, { once: true });
     const memory = setInterval(() => {
@@ -95,22 +93,19 @@ async function residentBytes(pid: number | undefined): Promise<number> {
   return Number(/^VmRSS:\s*(\d+) kB/m.exec(status)?.[1] ?? 0) * 1024;
 }
 
-function refusal({ code, detail, limit }: Extract<ReaderMessage, { type: 'refused' }>): Error {
+function refusal({ code, detail, limit }: { code: string; detail: string; limit?: number }): Error {
   return isRefusalCode(code)
-    ? new UploadRefused(code, String(detail), limit)
+    ? new UploadRefused(code, detail, limit)
     : new Error(`The upload reader refused with an unknown code: ${code}`);
 }
 
 /** A reader that dies is a finding about the file, unless it could not even be loaded. */
-function deathOf(
-  { fileName, limits }: ReadRequest,
-  errors: string,
-  code: number | null,
-  killedBy: string | null,
-): Error {
+function deathOf(request: ReadRequest, errors: string, code: number | null, killedBy: string | null): Error {
+  const { fileName, limits } = request;
   if (/too-much-memory|heap out of memory|allocation failed/i.test(errors))
     return tooMuchMemory(fileName, limits.residentBytes);
-  if (errors.includes('took-too-long')) return tookTooLong(fileName, limits.wallSeconds);
+  if (errors.includes('too-much-cpu')) return tookTooLong(fileName, limits.cpuSeconds, ' of processor time');
+  if (errors.includes('took-too-long')) return tookTooLong(fileName, wallSecondsOf(request));
   if (/Cannot find module|SyntaxError/.test(errors))
     return new Error(`The upload reader cannot start:\n${errors}`);
   const reason =
@@ -118,10 +113,10 @@ function deathOf(
   return damaged(fileName, `it cannot be read (${reason})`);
 }
 
-const tookTooLong = (fileName: string, seconds: number): UploadRefused =>
+const tookTooLong = (fileName: string, seconds: number, kind = ''): UploadRefused =>
   new UploadRefused(
     'took-too-long',
-    `"${fileName}" was not read within ${seconds} s. Keep only the sheets that are needed, or save them as .csv.`,
+    `"${fileName}" was not read within ${seconds} s${kind}. Keep only the sheets that are needed, or save them as .csv.`,
     seconds,
   );
 

@@ -164,9 +164,13 @@ class RowSender {
         continue;
       }
       this.placeBlanks();
-      const where = `"${fileName}", row ${countInWords(this.count + 1)}`;
       if (this.count >= limits.textRows) throw tooManyRows(fileName, limits.textRows);
-      if (row.length > limits.columns) throw tooManyColumns(where, row.length, limits.columns);
+      if (row.length > limits.columns)
+        throw tooManyColumns(
+          `"${fileName}", row ${countInWords(this.count + 1)}`,
+          row.length,
+          limits.columns,
+        );
       const long = row.findIndex((cell) => typeof cell === 'string' && cell.length > limits.cellCharacters);
       if (long >= 0 && quotes) return 'overlong';
       if (long >= 0)

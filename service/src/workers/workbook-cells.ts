@@ -125,8 +125,7 @@ function wireValue(cell: CellObject, context: SheetContext): WireCell {
 function wireNumber(cell: CellObject, { date1904, dates }: SheetContext): WireCell {
   const value = cell.v;
   if (typeof value !== 'number' || !Number.isFinite(value)) {
-    const text = cell.w ?? String(value ?? '');
-    return text === '' ? null : text;
+    return kind('error', cell.w ?? String(value ?? ''));
   }
   const format = typeof cell.z === 'string' ? cell.z : 'General';
   // A duration such as [h]:mm counts hours beyond a day: it stays a number.

@@ -32,6 +32,9 @@ export function checkWorkbookParts(
       `"${fileName}" holds an .${found} workbook. Name it .${found} and send it again.`,
     );
   }
+  const content = members.get('content.xml');
+  if (found === 'ods' && content && repeatedCells(content) > limits.workbookCells)
+    throw tooManyCells(fileName, limits.workbookCells);
   refuseCutOrOvergrownSheets(members, fileName, limits);
 }
 
@@ -100,6 +103,23 @@ function filledCells(xml: Buffer): number {
   }
   return cells;
 }
+
+/** Filled cells of an OpenDocument sheet with their repetitions: a few bytes may stand for a billion cells. */
+function repeatedCells(xml: Buffer): number {
+  let cells = 0;
+  let rowTimes = 1;
+  for (const [, tag, attributes] of xml
+    .toString('latin1')
+    .matchAll(/<(?:[\w-]+:)?table-(row|cell)\b([^>]*)>/g)) {
+    if (tag === 'row') rowTimes = timesOf(attributes!, 'rows');
+    else if (!attributes!.endsWith('/') || attributes!.includes('value'))
+      cells += rowTimes * timesOf(attributes!, 'columns');
+  }
+  return cells;
+}
+
+const timesOf = (attributes: string, what: 'rows' | 'columns'): number =>
+  Number(new RegExp(`number-${what}-repeated=["'](\\d+)["']`).exec(attributes)?.[1] ?? 1);
 
 export const tooManyCells = (fileName: string, limit: number): UploadRefused =>
   new UploadRefused(

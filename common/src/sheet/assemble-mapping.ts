@@ -1,7 +1,7 @@
 import { columnLetter } from './grid';
 import type { ColumnProposal, Mapping, TableConstant, TableProposal } from './mapping';
 import type { RowSpan } from './positions';
-import type { Claim } from './recognise-columns';
+import type { Claim } from './claim';
 
 /** A table on its way to the proposal. */
 export interface Draft {
@@ -17,23 +17,29 @@ export interface Draft {
 /** One list of columns for each sheet; where tables of one sheet differ, each column says to which it belongs. */
 export function assembleMapping(drafts: Draft[]): Mapping {
   const mapping: Mapping = { tables: drafts.map((draft) => draft.table), columns: [], constants: [] };
-  for (const [index, draft] of drafts.entries()) {
-    const siblings = drafts.filter((other) => other.table.sheet === draft.table.sheet);
-    const wanted = draft.table.used || !siblings.some((other) => other.table.used);
-    const isFirstAlike =
-      siblings.find((other) => layout(other) === layout(draft) && other.table.used === draft.table.used) ===
-      draft;
-    if (!wanted || !isFirstAlike) continue;
-    const differs = siblings.some((other) => other.table.used && layout(other) !== layout(draft));
-    const mark = differs ? { table: index } : {};
-    mapping.columns.push(
-      ...draft.claims
-        .filter(isWorthListing)
-        .map((claim) => ({ ...column(claim, draft.table.sheet), ...mark })),
-    );
-    mapping.constants.push(...draft.constants.map((constant) => ({ ...constant, ...mark })));
+  for (const listed of bySheet(drafts).values()) {
+    const layouts = new Set(listed.map(({ draft }) => layout(draft)));
+    const differ = layouts.size > 1;
+    for (const { draft, index } of differ ? listed : listed.slice(0, 1)) {
+      const mark = differ ? { table: index } : {};
+      const columns = draft.claims.filter(isWorthListing).map((claim) => column(claim, draft.table.sheet));
+      mapping.columns.push(...columns.map((one) => ({ ...one, ...mark })));
+      mapping.constants.push(...draft.constants.map((one) => ({ ...one, ...mark })));
+    }
   }
   return mapping;
+}
+
+/** Tables of each sheet whose columns are listed: the used ones, or the first where none is used. */
+function bySheet(drafts: Draft[]): Map<string, { draft: Draft; index: number }[]> {
+  const sheets = new Map<string, { draft: Draft; index: number }[]>();
+  for (const [index, draft] of drafts.entries()) {
+    const listed = sheets.get(draft.table.sheet) ?? [];
+    if (draft.table.used && listed[0]?.draft.table.used === false) listed.length = 0;
+    if (draft.table.used || listed.length === 0) listed.push({ draft, index });
+    sheets.set(draft.table.sheet, listed);
+  }
+  return sheets;
 }
 
 const layout = (draft: Draft): string =>

@@ -2,7 +2,7 @@ import type { DatasetKind } from '../dataset/field';
 import { isDustProxy } from '../dataset/flux-quantity';
 import type { RawSheet } from './grid';
 import { columnLetter } from './grid';
-import type { Claim } from './recognise-columns';
+import type { Claim } from './claim';
 import { isFilled, textOf } from './row-kind';
 
 /** Settles the claims of one table: each field has one column, apart from tracer fluxes, which stand side by side. */

@@ -1,3 +1,4 @@
+import * as fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { datasetKind } from '../dataset/kinds';
 import { sampleText, sampleWorkbook, sheetOfValues, textWorkbook } from './fixtures.test-support';
@@ -191,6 +192,14 @@ describe('layouts', () => {
     ]);
   });
 
+  test('a sheet of very many tables is read up to a limit, and the rest is named', () => {
+    const many = Array.from({ length: 100 }, () => [head, [1, 0.5], [2, 0.6], [null]]).flat();
+    const { tables } = propose(book(sheetOfValues('Report', many)));
+    expect(tables).toHaveLength(61);
+    expect(tables.at(-1)).toMatchObject({ used: false, lastRow: 400 });
+    expect(tables.at(-1)?.reason).toContain('more than 60 tables');
+  });
+
   test('subtotals, sub-headings and blank rows inside a table are passed over', () => {
     const rows = [
       ['Site', ...head],
@@ -256,4 +265,41 @@ describe('layouts', () => {
     expect(mapping.columns.filter((one) => one.field === 'aod').map((one) => one.column)).toEqual(['F']);
     expect(mapping.constants).toMatchObject([{ field: 'wavelengthNm', text: '500' }]);
   });
+});
+
+test('whatever a sheet holds, proposing and reading neither throw nor give a number that is not finite', () => {
+  const word = fc.constantFrom(
+    'Age',
+    'Dust flux',
+    'ka BP',
+    'g/m2/yr',
+    'mean',
+    'NaN',
+    '-999',
+    '1,234',
+    '<0.02',
+    '±',
+    '75°S',
+    'Lat',
+    '#',
+    '2σ',
+    '=1/0',
+  );
+  const value = fc.oneof(
+    word,
+    fc.string({ unit: 'grapheme', maxLength: 12 }),
+    fc.double({ noNaN: true, noDefaultInfinity: true }),
+    fc.constant(null),
+  );
+  const grid = fc.array(fc.array(value, { maxLength: 6 }), { maxLength: 14 });
+  fc.assert(
+    fc.property(grid, fc.constantFrom('dust-flux', 'point-optical-depth'), (rows, id) => {
+      const workbook = book(sheetOfValues('Any', rows));
+      const kind = datasetKind(id);
+      const { rows: samples } = normaliseWorkbook(workbook, kind, proposeWorkbook(workbook, kind));
+      const numbers = samples.flatMap((one) => Object.values(one)).filter((one) => typeof one === 'number');
+      expect(numbers.every(Number.isFinite)).toBe(true);
+    }),
+    { numRuns: 300 },
+  );
 });

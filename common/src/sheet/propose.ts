@@ -7,11 +7,14 @@ import { columnLetter, type RawSheet, type RawWorkbook } from './grid';
 import { assembleMapping, type Draft } from './assemble-mapping';
 import type { Mapping, TableProposal } from './mapping';
 import { positionInNotes } from './positions';
-import { type Claim, recogniseColumns } from './recognise-columns';
+import type { Claim } from './claim';
+import { recogniseColumns } from './recognise-columns';
 import { isFilled, isNumberLike } from './row-kind';
-import { reasonToSetAside } from './set-aside';
+import { type PassOverNote, passOverNotes, reasonToSetAside } from './set-aside';
 import { tableConstants } from './table-constants';
 
+/** A sheet with more is a report, not data. */
+const MOST_TABLES = 60;
 /** Rows looked at to tell a column of numbers from one of texts. */
 const ROWS_SAMPLED = 200;
 
@@ -25,18 +28,27 @@ const ROWS_SAMPLED = 200;
 export function proposeWorkbook(workbook: RawWorkbook, kind: DatasetKind): Mapping {
   const found = new Map(workbook.sheets.map((sheet) => [sheet, findTables(sheet)]));
   const notesPosition = positionInNotes(workbook, (sheet) => (found.get(sheet) ?? []).length === 0);
-  const drafts = workbook.sheets.flatMap((sheet) => draftsOf(sheet, found.get(sheet) ?? [], workbook, kind));
+  const notes = passOverNotes(workbook);
+  const drafts = workbook.sheets.flatMap((sheet) =>
+    draftsOf(sheet, found.get(sheet) ?? [], { workbook, kind, notes }),
+  );
   for (const draft of drafts) {
     if (draft.table.used) draft.constants = tableConstants(draft, workbook, kind, notesPosition);
   }
   return assembleMapping(drafts);
 }
 
-function draftsOf(sheet: RawSheet, tables: FoundTable[], workbook: RawWorkbook, kind: DatasetKind): Draft[] {
+interface FileAtHand {
+  workbook: RawWorkbook;
+  kind: DatasetKind;
+  notes: PassOverNote[];
+}
+
+function draftsOf(sheet: RawSheet, tables: FoundTable[], file: FileAtHand): Draft[] {
   if (tables.length === 0)
     return [{ table: notesOnly(sheet), claims: [], constants: [], span: null, general: null }];
   const drafts: Draft[] = [];
-  for (const found of tables) {
+  for (const found of tables.slice(0, MOST_TABLES)) {
     const headed = drafts.at(-1);
     const span = {
       from: headed === undefined ? 1 : headed.table.lastRow + 1,
@@ -48,11 +60,22 @@ function draftsOf(sheet: RawSheet, tables: FoundTable[], workbook: RawWorkbook, 
     drafts.push(
       continues
         ? { ...headed, table: continued(sheet, found, headed.table) }
-        : { ...draftOf(sheet, found, workbook, kind), span, general },
+        : { ...draftOf(sheet, found, file), span, general },
     );
   }
+  const beyond = tables[MOST_TABLES];
+  if (beyond)
+    drafts.push({ table: notRead(sheet, beyond), claims: [], constants: [], span: null, general: null });
   return drafts;
 }
+
+const notRead = (sheet: RawSheet, from: FoundTable): TableProposal => ({
+  ...from,
+  sheet: sheet.name,
+  lastRow: sheet.rows.length,
+  used: false,
+  reason: `The sheet has more than ${MOST_TABLES} tables; from row ${from.firstRow} on it is not read. Put the tables below one heading, or on several sheets.`,
+});
 
 const continued = (sheet: RawSheet, found: FoundTable, above: TableProposal): TableProposal => ({
   ...found,
@@ -77,7 +100,7 @@ function notesOnly(sheet: RawSheet): TableProposal {
   };
 }
 
-function draftOf(sheet: RawSheet, found: FoundTable, workbook: RawWorkbook, kind: DatasetKind): Draft {
+function draftOf(sheet: RawSheet, found: FoundTable, { workbook, kind, notes }: FileAtHand): Draft {
   const firstHeaderRow = found.headerRows[0] ?? found.firstRow;
   const claims = chooseFields(
     recogniseColumns(columnHeadings(sheet, found), kind, (index) => numberShare(sheet, found, index)),
@@ -85,7 +108,7 @@ function draftOf(sheet: RawSheet, found: FoundTable, workbook: RawWorkbook, kind
     sheet,
     firstHeaderRow,
   );
-  const setAside = reasonToSetAside(sheet, workbook, found.firstRow);
+  const setAside = reasonToSetAside(sheet, workbook, found.firstRow, notes);
   const unusable = setAside ?? reasonNotUsable(claims, found, kind);
   const table: TableProposal = {
     ...found,
@@ -125,15 +148,23 @@ function reasonNotUsable(claims: Claim[], found: FoundTable, kind: DatasetKind):
   const tracers = claims
     .filter((claim) => claim.reason.startsWith('A concentration of'))
     .map((claim) => claim.heading.text);
-  return `No column is recognised as ${title}${tracers.length > 0 ? `; it holds concentrations (${tracers.join(', ')})` : ''}. Assign one to use the table.`;
+  const instead = tracers.length > 0 ? `; it holds concentrations (${firstFew(tracers)})` : '';
+  return `No column is recognised as ${title}${instead}. Assign one to use the table.`;
 }
+
+/** Reasons are read by people and stored: long lists and texts are cut. */
+const firstFew = (texts: string[]): string =>
+  texts
+    .slice(0, 5)
+    .map((text) => text.slice(0, 60))
+    .join(', ') + (texts.length > 5 ? ' …' : '');
 
 function reasonUsed(found: FoundTable, claims: Claim[], kind: DatasetKind): string {
   const value = claims.filter((claim) => claim.field === kind.valueField);
   const units = found.unitsRow === null ? '' : `, units in row ${found.unitsRow}`;
   const what =
     value.length > 0
-      ? `"${value.map((claim) => claim.heading.text).join('", "')}" in column ${value.map((claim) => columnLetter(claim.heading.index)).join(', ')}`
+      ? `${firstFew(value.map((claim) => `"${claim.heading.text}" in column ${columnLetter(claim.heading.index)}`))}`
       : 'what a flux can be computed from';
   return `Rows ${found.firstRow}–${found.lastRow} under the header row${found.headerRows.length > 1 ? 's' : ''} ${found.headerRows.join(', ')}${units}, with ${what}.`;
 }

@@ -1,39 +1,17 @@
 import type { FieldDeclaration } from '../dataset/field';
 import type { TracedValue } from '../dataset/sample-row';
-import { ageConversion, parseAgeUnit } from '../units/age';
 import { type Axis, foldCoordinate, isCoordinateProblem, parseCoordinate } from '../units/coordinate';
-import { convertTo, type UnitKind } from '../units/convert';
 import { type EastLetter, letterOMeaning } from '../units/hemisphere';
 import { isMissingNumber, missingCodeOf } from '../units/missing-code';
 import { type NumberReading, readNumber } from '../units/number';
 import { DECIMAL_POINT, type NumberFormat } from '../units/number-format';
-import { isUnitProblem } from '../units/unit';
+import { type ColumnScale, type ColumnSource, scaleOf } from './column-scale';
 import type { RawCell } from './grid';
-
-/** How values of one column become canonical: value × factor + offset, or why they cannot. */
-interface Scale {
-  factor: number;
-  offset: number;
-  rule: string;
-  problem?: { code: string; message: string };
-  /** what a person should know of the whole column */
-  notes: { code: string; message: string }[];
-}
-
-export interface ColumnSource {
-  field: FieldDeclaration;
-  heading: string;
-  unit: string | null;
-  /** numbers are divided by it: 2 for a column headed 2σ */
-  divisor: number;
-  /** datum of ages that name none, as the form says it: "b2k", "CE", "BP 1950" */
-  ageDatum?: string;
-}
 
 /** Everything needed to read the cells of one column, decided once. */
 export interface ColumnReader {
   field: FieldDeclaration;
-  scale: Scale;
+  scale: ColumnScale;
   format: NumberFormat;
   letterO: EastLetter | undefined;
   divisor: number;
@@ -43,57 +21,6 @@ export function columnReader(source: ColumnSource, format: NumberFormat, texts: 
   const { field, divisor } = source;
   const letterO = field.quantity === 'longitude' ? letterOMeaning(texts, source.heading) : undefined;
   return { field, scale: scaleOf(source), format, letterO, divisor };
-}
-
-function scaleOf({ field, heading, unit, divisor, ageDatum }: ColumnSource): Scale {
-  const halved = divisor === 1 ? '' : ` ÷ ${divisor}`;
-  const { quantity } = field;
-  if (quantity === 'text' || quantity === 'count')
-    return { factor: 1, offset: 0, rule: 'as given', notes: [] };
-  if (quantity === 'latitude' || quantity === 'longitude')
-    return { factor: 1, offset: 0, rule: 'decimal degrees', notes: [] };
-  if (quantity === 'age') return ageScale(unit, heading, ageDatum);
-  const wanted = unit ?? (field.canonicalUnit === '1' ? '1' : '');
-  // The error of an age has the unit of the age itself, datum and all: "yr b2k" counts years.
-  const age = quantity === 'duration' ? parseAgeUnit(wanted) : null;
-  const conversion =
-    age && !isUnitProblem(age)
-      ? { factor: age.years / 1e3, explanation: `${age.text} × ${age.years / 1e3} = ka`, assumptions: [] }
-      : convertTo(quantity as UnitKind, wanted);
-  if (isUnitProblem(conversion))
-    return { factor: 1, offset: 0, rule: 'unit not understood', problem: conversion, notes: [] };
-  const notes = conversion.assumptions.map((message) => ({
-    code: 'unit-assumption',
-    message: `${unit}: ${message}.`,
-  }));
-  return {
-    factor: conversion.factor / divisor,
-    offset: 0,
-    rule: `${conversion.explanation}${halved}`,
-    notes,
-  };
-}
-
-function ageScale(unit: string | null, heading: string, ageDatum?: string): Scale {
-  const parsed = parseAgeUnit(unit ?? '', `${heading} `);
-  if (isUnitProblem(parsed))
-    return { factor: 1, offset: 0, rule: 'unit not understood', problem: parsed, notes: [] };
-  const answered =
-    parsed.datum === null && ageDatum ? parseAgeUnit(`yr ${ageDatum.replace(/^BP ?1950$/, 'BP')}`) : null;
-  const withDatum = answered && !isUnitProblem(answered) ? { ...parsed, datum: answered.datum } : parsed;
-  const conversion = ageConversion(withDatum);
-  const notes = [];
-  if (conversion.datumAssumed)
-    notes.push({
-      code: 'datum-assumed',
-      message: `"${heading}" names no datum; ages are taken before 1950 CE.`,
-    });
-  if (conversion.radiocarbon)
-    notes.push({
-      code: 'uncalibrated-radiocarbon',
-      message: `"${heading}" holds radiocarbon years that are not calibrated.`,
-    });
-  return { factor: conversion.factor, offset: conversion.offset, rule: conversion.explanation, notes };
 }
 
 export interface CellReading {
@@ -228,7 +155,7 @@ function readTyped(text: string, isMend: boolean, format: NumberFormat): NumberR
 }
 
 /** A unit written behind the number counts for that cell. */
-function cellScale(unitText: string, reader: ColumnReader): Scale {
+function cellScale(unitText: string, reader: ColumnReader): ColumnScale {
   return scaleOf({
     field: reader.field,
     heading: '',
@@ -238,7 +165,7 @@ function cellScale(unitText: string, reader: ColumnReader): Scale {
 }
 
 /** 12 digits: what a double loses in a product, and more than any measurement has. */
-const canonical = (value: number, scale: Pick<Scale, 'factor' | 'offset'>): number =>
+const canonical = (value: number, scale: Pick<ColumnScale, 'factor' | 'offset'>): number =>
   scale.factor === 1 && scale.offset === 0
     ? value
     : Number((value * scale.factor + scale.offset).toPrecision(12));

@@ -5,18 +5,9 @@ import { convertTo, UNIT_KINDS, type UnitKind } from '../units/convert';
 import { isUnitProblem } from '../units/unit';
 import type { ColumnHeading } from './column-headings';
 import { wavelengthNmIn } from './wavelength-in-heading';
-import { type Uncertainty, uncertaintyOf } from './heading';
-
-/** What one column may be. Several columns may claim one field; the best claim is chosen later. */
-export interface Claim {
-  heading: ColumnHeading;
-  field: string | null;
-  confidence: number;
-  reason: string;
-  /** of a mass flux: dust, or the tracer */
-  quantity?: string;
-  uncertainty?: Uncertainty;
-}
+import { type Claim, unclaimed } from './claim';
+import { claimUncertainty } from './claim-uncertainty';
+import { uncertaintyOf } from './heading';
 
 /** Share of a column's filled cells that read as numbers; undefined for an empty column. */
 export type NumberShare = (index: number) => number | undefined;
@@ -42,17 +33,10 @@ export function recogniseColumns(
   return claims;
 }
 
-const none = (heading: ColumnHeading, reason: string, confidence = 0): Claim => ({
-  heading,
-  field: null,
-  confidence,
-  reason,
-});
-
 function claimValue(heading: ColumnHeading, kind: DatasetKind, numberShare: NumberShare): Claim {
   const share = numberShare(heading.index);
   if (heading.text === '' && heading.unit === null)
-    return none(heading, share === undefined ? 'Empty column.' : 'The column has no heading.');
+    return unclaimed(heading, share === undefined ? 'Empty column.' : 'The column has no heading.');
   const tracer = fluxQuantityOf(heading.text);
   const isTracer = tracer !== null && tracer !== 'dust';
   const claims = kind.fields
@@ -103,7 +87,7 @@ function claimTracer(heading: ColumnHeading, tracer: string, kind: DatasetKind):
     const declared = kind.fields.find(
       (field) => field.headings.includes(heading.key) && field.quantity === 'massFraction',
     );
-    return declared ? null : none(heading, `A concentration of ${tracer}, not a flux of dust.`, 0.8);
+    return declared ? null : unclaimed(heading, `A concentration of ${tracer}, not a flux of dust.`, 0.8);
   }
   return null;
 }
@@ -171,7 +155,7 @@ function unitFit(
 /** No heading that is known, but a unit that only one field can have. */
 function byUnitAlone(heading: ColumnHeading, kind: DatasetKind, share: number | undefined): Claim {
   const { unit } = heading;
-  if (unit === null || (share ?? 0) < 0.3) return none(heading, 'No field of this kind is headed so.');
+  if (unit === null || (share ?? 0) < 0.3) return unclaimed(heading, 'No field of this kind is headed so.');
   const age = parseAgeUnit(unit);
   if (!isUnitProblem(age) && age.datum !== null && kind.fields.some((field) => field.field === 'ageKaBp')) {
     return { heading, field: 'ageKaBp', confidence: 0.6, reason: `Only an age has the unit ${unit}.` };
@@ -186,71 +170,5 @@ function byUnitAlone(heading: ColumnHeading, kind: DatasetKind, share: number | 
       reason: `It names dust and has the unit of a flux, ${unit}.`,
     };
   }
-  return none(heading, 'No field of this kind is headed so.');
-}
-
-/** Fields an uncertainty can belong to, and the field of the uncertainty. */
-function sigmaFieldOf(field: string | null, kind: DatasetKind): string | null {
-  if (field === kind.valueField) return kind.sigmaField;
-  return field === 'ageKaBp' && kind.fields.some((declared) => declared.field === 'ageSigmaKa')
-    ? 'ageSigmaKa'
-    : null;
-}
-
-function claimUncertainty(
-  heading: ColumnHeading,
-  uncertainty: Uncertainty,
-  before: Claim[],
-  kind: DatasetKind,
-): Claim {
-  const named = uncertainty.baseKey === '' ? undefined : namedClaim(uncertainty.baseKey, before);
-  const owner =
-    named ?? before.filter((claim) => !claim.uncertainty && claim.reason !== 'Empty column.').at(-1);
-  const what = uncertainty.deviation
-    ? 'standard deviation'
-    : uncertainty.sigmas === 2
-      ? 'two standard errors'
-      : 'uncertainty';
-  const field = owner ? sigmaFieldOf(owner.field, kind) : null;
-  if (!owner || field === null) {
-    return {
-      ...none(
-        heading,
-        `The ${what} of ${owner ? `"${owner.heading.text}"` : 'a column'}, which has no field here.`,
-      ),
-      uncertainty,
-    };
-  }
-  const unit =
-    heading.unit !== null && looksCompatible(heading.unit, field) ? heading.unit : owner.heading.unit;
-  const taken =
-    unit === heading.unit ? '' : ` It has no unit of its own; that of "${owner.heading.text}" is taken.`;
-  return {
-    heading: { ...heading, unit },
-    field,
-    confidence: named ? 0.9 : 0.8,
-    reason: `The ${what} of "${owner.heading.text}".${taken}`,
-    uncertainty,
-    ...(owner.quantity ? { quantity: owner.quantity } : {}),
-  };
-}
-
-const looksCompatible = (unit: string, field: string): boolean =>
-  field === 'ageSigmaKa'
-    ? !isUnitProblem(parseAgeUnit(unit))
-    : field === 'aodSigma' || !/^\d\s*\p{L}$/u.test(unit);
-
-/** The value column that an uncertainty names: "Age error", "Dust flux ± ". */
-function namedClaim(baseKey: string, before: Claim[]): Claim | undefined {
-  const words = baseKey.split(' ');
-  const score = (claim: Claim): number => {
-    const own = claim.heading.key.split(' ');
-    return words.filter((word) => own.includes(word)).length / Math.max(words.length, own.length);
-  };
-  const candidates = before.filter((claim) => !claim.uncertainty && claim.heading.key !== '');
-  const best = candidates.reduce<Claim | undefined>(
-    (top, claim) => (top === undefined || score(claim) >= score(top) ? claim : top),
-    undefined,
-  );
-  return best && score(best) > 0.3 ? best : undefined;
+  return unclaimed(heading, 'No field of this kind is headed so.');
 }

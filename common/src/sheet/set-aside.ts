@@ -7,13 +7,22 @@ const PASS_OVER =
 const NAMED_OLD =
   /(?:^|[\s_(-])(?:old|alt|obsolete|superseded|backup|bak|deprecated|veraltet|ancien|vieux|viejo|antiguo|draft|entwurf)(?:$|[\s_)-])/i;
 const LONGEST_NOTE = 2000;
+const SHORTEST_NOTE = 6;
+const LONGEST_QUOTE = 200;
+/** Far more than any file that speaks to its reader has. */
+const MOST_NOTES = 500;
 
 /**
  * Why a sheet is to be left alone: a note anywhere in the file says so of it by name, the sheet says so of itself,
  * it is hidden, or its own name calls it old. Null when nothing does.
  */
-export function reasonToSetAside(sheet: RawSheet, workbook: RawWorkbook, beforeRow: number): string | null {
-  const noted = noteAbout(sheet, workbook);
+export function reasonToSetAside(
+  sheet: RawSheet,
+  workbook: RawWorkbook,
+  beforeRow: number,
+  notes: PassOverNote[],
+): string | null {
+  const noted = noteAbout(sheet, workbook, notes);
   const own = ownRemark(sheet, beforeRow);
   const reasons = [noted, own].filter((reason) => reason !== null);
   if (reasons.length > 0) return reasons.join(' ');
@@ -22,22 +31,40 @@ export function reasonToSetAside(sheet: RawSheet, workbook: RawWorkbook, beforeR
   return sheet.hidden ? 'The sheet is hidden; use it if it is the right one.' : null;
 }
 
-function noteAbout(sheet: RawSheet, workbook: RawWorkbook): string | null {
-  for (const other of workbook.sheets) {
-    for (const [r, row] of other.rows.entries()) {
+/** A text of the file that tells the reader to pass something over. */
+export interface PassOverNote {
+  sheet: string;
+  cell: string;
+  text: string;
+}
+
+/** All such texts, gathered once for a workbook. */
+export function passOverNotes(workbook: RawWorkbook): PassOverNote[] {
+  const notes: PassOverNote[] = [];
+  for (const sheet of workbook.sheets) {
+    for (const [r, row] of sheet.rows.entries()) {
       for (const [c, cell] of row.entries()) {
         if (
           !isFilled(cell) ||
           cell.kind !== 'text' ||
-          cell.text.length > LONGEST_NOTE ||
-          !PASS_OVER.test(cell.text)
+          cell.text.length < SHORTEST_NOTE ||
+          cell.text.length > LONGEST_NOTE
         )
           continue;
-        const about = cell.text.split(/[.!?]\s+/).find((sentence) => isAbout(sentence, sheet, workbook));
-        if (about !== undefined)
-          return `Cell ${cellAddress(c, r + 1)} of sheet "${other.name}" says: "${about.trim()}".`;
+        if (PASS_OVER.test(cell.text))
+          notes.push({ sheet: sheet.name, cell: cellAddress(c, r + 1), text: cell.text });
+        if (notes.length >= MOST_NOTES) return notes;
       }
     }
+  }
+  return notes;
+}
+
+function noteAbout(sheet: RawSheet, workbook: RawWorkbook, notes: PassOverNote[]): string | null {
+  for (const note of notes) {
+    const about = note.text.split(/[.!?]\s+/).find((sentence) => isAbout(sentence, sheet, workbook));
+    if (about !== undefined)
+      return `Cell ${note.cell} of sheet "${note.sheet}" says: "${about.trim().slice(0, LONGEST_QUOTE)}".`;
   }
   return null;
 }

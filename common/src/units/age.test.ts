@@ -1,12 +1,12 @@
 import * as fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { ageConversion, type AgeUnit, parseAgeUnit, toAgeKaBp } from './age';
+import { ageConversion, parseAgeUnit, toAgeKaBp } from './age';
 import { isUnitProblem } from './unit';
 
 const conversionOf = (unit: string, heading = '') => {
   const parsed = parseAgeUnit(unit, heading);
   if (isUnitProblem(parsed)) throw new Error(parsed.message);
-  return ageConversion(parsed as AgeUnit);
+  return ageConversion(parsed);
 };
 const age = (value: number, unit: string, heading = '') => toAgeKaBp(value, conversionOf(unit, heading));
 

@@ -82,18 +82,20 @@ function readPlain(text: string, plain: string, format: NumberFormat): NumberRea
   if (rest !== '' && !/^[\p{L}°%‰µμ(/[]/u.test(rest)) return unreadable(text);
   if (rest !== '' && /^[\p{L}]/u.test(rest) && /\d$/.test(whole) && /^[eE]\d/.test(rest))
     return unreadable(text);
+  if (format.undecided && OPEN.test(digits.trim())) return ambiguous(text);
   const mantissa = digitsByFormat(digits.trim(), format);
-  if (mantissa === 'ambiguous') return ambiguous(text);
   if (mantissa === null) return wrongFormat(text, format);
   const value = Number(`${sign}${mantissa}e${power ?? '0'}`) + 0;
   if (!Number.isFinite(value)) return unreadable(text);
   return { value, ...(mark?.[1] ? { footnote: mark[1] } : {}), ...(rest !== '' ? { unitText: rest } : {}) };
 }
 
+/** Three digits behind the only sign: decimal or thousands. */
+const OPEN = /^(?!0)\d{1,3}[.,]\d{3}$/;
+
 /** Digits with "." as decimal sign, by the format; null when the separators do not fit it. */
-function digitsByFormat(digits: string, format: NumberFormat): string | 'ambiguous' | null {
+function digitsByFormat(digits: string, format: NumberFormat): string | null {
   if (/^\d+$/.test(digits)) return digits;
-  if (format.undecided && /^(?!0)\d{1,3}[.,]\d{3}$/.test(digits)) return 'ambiguous';
   const [whole = '', fraction, more] = digits.split(format.decimalSign);
   if (more !== undefined || (fraction !== undefined && /\D/.test(fraction))) return null;
   const plainWhole = ungroup(whole);

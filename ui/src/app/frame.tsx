@@ -1,5 +1,6 @@
 import { useEffect, useMemo, useRef, useState } from 'react';
 import {
+  NavigationType,
   Outlet,
   redirect,
   useLocation,
@@ -25,7 +26,7 @@ export const frameLoader: LoaderFunction = async ({ request }) => {
   const session = await queryClient.ensureQueryData(sessionQuery);
   if (session.person) return null;
   const { pathname, search } = new URL(request.url);
-  throw redirect(pathname === '/' ? '/sign-in' : `/sign-in?next=${encodeURIComponent(pathname + search)}`);
+  return redirect(pathname === '/' ? '/sign-in' : `/sign-in?next=${encodeURIComponent(pathname + search)}`);
 };
 
 /** Column, top bar and page. */
@@ -85,7 +86,7 @@ function usePageFocus() {
       first.current = false;
       return;
     }
-    if (how !== 'POP' && main.current) main.current.scrollTop = 0;
+    if (how !== NavigationType.Pop && main.current) main.current.scrollTop = 0;
     (main.current?.querySelector('h1') ?? main.current)?.focus({ preventScroll: true });
   }, [pathname, how]);
   return main;

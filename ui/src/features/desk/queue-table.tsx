@@ -68,6 +68,8 @@ export function QueueTable({ queue }: { queue: DeskView['queue'] }) {
   );
 }
 
+const hoursSince = (iso: string) => (Date.now() - Date.parse(iso)) / 3_600_000;
+
 const columnsFor = (personId: string): DataColumn<Queued>[] => [
   {
     id: 'number',
@@ -96,7 +98,7 @@ const columnsFor = (personId: string): DataColumn<Queued>[] => [
     id: 'waits',
     header: 'Waits',
     align: 'right',
-    value: (row) => -Date.parse(row.waitsSince),
+    value: (row) => hoursSince(row.waitsSince),
     cell: (row) => formatWaits(row.waitsSince),
   },
   {

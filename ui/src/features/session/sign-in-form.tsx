@@ -53,9 +53,9 @@ export function SignInForm({ onForgotten }: { onForgotten: () => void }) {
         />
       </FormField>
       <div className="gate-row">
-        <Button appearance="transparent" size="small" onClick={onForgotten}>
+        <button type="button" className="gate-link" onClick={onForgotten}>
           Forgotten?
-        </Button>
+        </button>
       </div>
       <Button type="submit" appearance="primary" size="large" disabled={enter.isPending}>
         {enter.isPending ? 'Signing in' : 'Sign in'}

@@ -20,14 +20,20 @@ export function StrataColumn({ slices, selected, open, heightPx, addressOf }: Pr
   const { mode } = useColourMode();
   const layout = useMemo(() => strataLayout(slices, heightPx), [slices, heightPx]);
   const rightPx = open ? 62 : 43;
-  const first = selected && slices.some((slice) => slice.slug === selected) ? selected : layout.beds[0]?.slice.slug;
+  const first =
+    selected && slices.some((slice) => slice.slug === selected) ? selected : layout.beds[0]?.slice.slug;
   return (
     <div className={open ? 'strata open' : 'strata'} style={{ height: layout.heightPx }}>
       <StrataDrawing {...{ layout, selected, rightPx, mode }} leftPx={10} limitWm2={columnLimitWm2(slices)} />
       <ol onKeyDown={moveByArrows('ArrowUp', 'ArrowDown')}>
         {layout.beds.map((bed) => (
           <li key={bed.slice.slug} style={{ top: bed.topPx, height: bed.rowPx }}>
-            <BedLink {...{ bed, open, rightPx }} to={addressOf(bed.slice.slug)} on={bed.slice.slug === selected} reachable={bed.slice.slug === first} />
+            <BedLink
+              {...{ bed, open, rightPx }}
+              to={addressOf(bed.slice.slug)}
+              on={bed.slice.slug === selected}
+              reachable={bed.slice.slug === first}
+            />
           </li>
         ))}
       </ol>
@@ -62,7 +68,10 @@ function BedLink({ bed, open, rightPx, to, on, reachable }: BedLinkProps) {
 
 /** What the colour and the ochre rule say, for those who do not see them. */
 export function inWords(slice: ColumnSlice): string {
-  const net = slice.latestNetWm2 === null ? 'no estimate yet' : `net forcing ${formatForcing(slice.latestNetWm2)} watts per square metre`;
+  const net =
+    slice.latestNetWm2 === null
+      ? 'no estimate yet'
+      : `net forcing ${formatForcing(slice.latestNetWm2)} watts per square metre`;
   return slice.stale ? `${net}, inputs superseded` : net;
 }
 

@@ -86,7 +86,7 @@ function BedShape({ bed, path, clip, seed, fromPx, rightPx, limitWm2, mode }: Sh
     <g>
       <path
         d={path}
-        className={net === null ? (bed.lens ? 'bed blank lens' : 'bed blank') : 'bed'}
+        className={['bed', net === null && 'blank', bed.lens && 'lens'].filter(Boolean).join(' ')}
         style={net === null ? undefined : { fill: forcingColour(net, limitWm2, mode) }}
       />
       {net !== null && (

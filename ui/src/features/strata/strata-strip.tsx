@@ -29,7 +29,11 @@ export function StrataStrip({ slices, selected, addressOf }: Props) {
           >
             <i
               className={`${slice.latestNetWm2 === null ? 'blank' : ''} ${lens ? 'lens' : ''}`}
-              style={slice.latestNetWm2 === null ? undefined : { background: forcingColour(slice.latestNetWm2, limit, mode) }}
+              style={
+                slice.latestNetWm2 === null
+                  ? undefined
+                  : { background: forcingColour(slice.latestNetWm2, limit, mode) }
+              }
             />
             {slice.stale && <u />}
             <span>{slice.label}</span>

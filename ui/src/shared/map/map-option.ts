@@ -4,7 +4,6 @@ import { colours, type ColourMode } from '../theme/tokens';
 import { hatchTile } from './hatch';
 import type { MapData, MapRegion } from './map-data';
 import { projectionOf } from './projections';
-import { paintRaster } from './raster';
 
 export const WORLD = 'siltlight-world';
 

@@ -3,8 +3,9 @@ import { digitGroups, formatNumber, scientificParts } from './format';
 type Props = { value: number | null | undefined; decimals?: number; figures?: number; signed?: boolean };
 
 /** A number with narrow gaps between its groups of digits (a margin: Lato has no thin space). */
-export function Digits({ value, decimals, figures, signed }: Props) {
+export function Digits({ value, decimals: wanted, figures, signed }: Props) {
   if (value === null || value === undefined) return <span className="sl-muted">–</span>;
+  const decimals = wanted ?? (figures === undefined && Number.isInteger(value) ? 0 : undefined);
   const scientific = decimals === undefined ? scientificParts(value, figures) : null;
   if (scientific) {
     return (

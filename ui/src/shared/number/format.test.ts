@@ -43,6 +43,7 @@ test('very large and very small values take a power of ten', () => {
 
 test('ages, sizes and durations are written without needless figures', () => {
   expect(formatAgeSpan(19, 23)).toBe('23 to 19 ka');
+  expect(formatAgeSpan(635_000, 650_000)).toBe('650 to 635 Ma');
   expect(formatAgeSpan(0.05, 5.5)).toBe('5.5 to 0.05 ka');
   expect(formatBytes(999)).toBe('999 B');
   expect(formatBytes(1_234_567)).toBe('1.23 MB');

@@ -56,8 +56,11 @@ function decimalsShown(value: number): number {
   return text.includes('.') ? text.split('.')[1]!.length : 0;
 }
 
-export const formatAgeSpan = (youngKa: number, oldKa: number) =>
-  `${formatAge(oldKa)} to ${formatAge(youngKa)} ka`;
+/** An evidence window; from a million years on it is told in Ma. */
+export function formatAgeSpan(youngKa: number, oldKa: number): string {
+  if (youngKa >= 1000) return `${formatAge(oldKa / 1000)} to ${formatAge(youngKa / 1000)} Ma`;
+  return `${formatAge(oldKa)} to ${formatAge(youngKa)} ka`;
+}
 
 export function formatBytes(bytes: number): string {
   if (bytes < 1000) return `${bytes} B`;

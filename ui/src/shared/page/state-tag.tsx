@@ -40,7 +40,7 @@ const states: Record<string, [word: string, icon: FluentIcon, tint: Tint]> = {
 
 /** State of an object: icon, word and bar. A state not known here is shown by its own word. */
 export function StateTag({ state, word }: { state: string; word?: string }) {
-  const [known, Icon, tint] = states[state] ?? [state, Circle16Regular, 'plain' as Tint];
+  const [known, Icon, tint] = states[state] ?? [state, Circle16Regular, 'plain'];
   return (
     <span className={`state-tag ${tint}`}>
       <Icon aria-hidden />

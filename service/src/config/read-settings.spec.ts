@@ -5,11 +5,17 @@ import { readSettings, SettingsError } from './read-settings';
 
 const dataDir = fs.mkdtempSync(path.join(os.tmpdir(), 'siltlight-settings-'));
 afterAll(() => fs.rmSync(dataDir, { recursive: true }));
-const given = (variables: Record<string, string>) => readSettings({ SILTLIGHT_DATA_DIR: dataDir, ...variables });
+const given = (variables: Record<string, string>) =>
+  readSettings({ SILTLIGHT_DATA_DIR: dataDir, ...variables });
 
 test('without any variable it is the demo on port 3000, with a secret of its own that it keeps', () => {
   const settings = given({});
-  expect(settings).toMatchObject({ port: 3000, demo: true, publicUrl: 'http://127.0.0.1:3000', smtp: undefined });
+  expect(settings).toMatchObject({
+    port: 3000,
+    demo: true,
+    publicUrl: 'http://127.0.0.1:3000',
+    smtp: undefined,
+  });
   expect(Buffer.byteLength(settings.secret)).toBeGreaterThanOrEqual(32);
   expect(given({}).secret).toBe(settings.secret);
 });
@@ -28,7 +34,9 @@ test.each([
   ['SILTLIGHT_PUBLIC_URL', 'ftp://example.org', '"ftp://example.org"'],
   ['SILTLIGHT_SMTP_PORT', '-1', '"-1"'],
 ])('%s=%s is refused with the variable, its value and a remedy', (variable, value, shown) => {
-  expect(() => given({ [variable]: value })).toThrow(new RegExp(`^${variable} is ${shown}, which cannot be used\\. \\w+`));
+  expect(() => given({ [variable]: value })).toThrow(
+    new RegExp(`^${variable} is ${shown}, which cannot be used\\. \\w+`),
+  );
 });
 
 test('a short secret or password is refused without being shown', () => {

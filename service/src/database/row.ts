@@ -18,7 +18,7 @@ export function nowIso(): string {
 
 /** Names the table; columns are the property names in snake_case; the migration alone makes the table. */
 export function StoredIn(tableName: string): ClassDecorator {
-  return (target) => Table({ tableName, underscored: true, timestamps: false })(target as never);
+  return Table({ tableName, underscored: true, timestamps: false }) as ClassDecorator;
 }
 
 export abstract class Row extends Model {
@@ -32,7 +32,7 @@ export abstract class Row extends Model {
 
 /** A text column that holds JSON. STRICT tables know no JSON type, so it is parsed here, at the edge. */
 export function JsonColumn(target: object, property: string): void {
-  Column({
+  const column = Column({
     type: DataType.TEXT,
     get(this: Model) {
       const text: unknown = this.getDataValue(property as never);
@@ -40,21 +40,23 @@ export function JsonColumn(target: object, property: string): void {
     },
     set(this: Model, value: unknown) {
       const stored = value === null || value === undefined ? value : JSON.stringify(value);
-      this.setDataValue(property as never, stored as never);
+      this.setDataValue(property as never, stored);
     },
-  })(target, property);
+  }) as PropertyDecorator;
+  column(target, property);
 }
 
 /** A truth value in an INTEGER column: STRICT tables know no boolean. */
 export function FlagColumn(target: object, property: string): void {
-  Column({
+  const column = Column({
     type: DataType.INTEGER,
     get(this: Model) {
       const stored: unknown = this.getDataValue(property as never);
       return stored === null || stored === undefined ? stored : stored === 1;
     },
     set(this: Model, value: unknown) {
-      this.setDataValue(property as never, (value ? 1 : 0) as never);
+      this.setDataValue(property as never, value ? 1 : 0);
     },
-  })(target, property);
+  }) as PropertyDecorator;
+  column(target, property);
 }

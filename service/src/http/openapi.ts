@@ -30,9 +30,9 @@ export function openApiDocument(app: INestApplication): OpenAPIObject {
       status: 'default' as never,
       description: 'What went wrong, and what to do about it',
       content: { 'application/problem+json': { schema: problemSchema } },
-    } as never)
+    })
     .build();
-  return cleanupOpenApiDoc(SwaggerModule.createDocument(app, base, { autoTagControllers: true } as never), {
+  return cleanupOpenApiDoc(SwaggerModule.createDocument(app, base, { autoTagControllers: true }), {
     version: '3.1',
   });
 }

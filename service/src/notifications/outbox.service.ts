@@ -3,6 +3,9 @@ import { InjectModel } from '@nestjs/sequelize';
 import { Op, type Transaction } from 'sequelize';
 import { Settings } from '../config/settings';
 import { newId, nowIso } from '../database/row';
+import { WriteQueue } from '../database/write-queue';
+import { notFound, problem } from '../http/problem';
+import { LedgerService } from '../ledger/ledger.service';
 import { PeopleService } from '../users/people.service';
 import { bodyOf, oneLine, subjectOf } from './mail-text';
 import { OutboxRow } from './models/outbox-row';
@@ -27,6 +30,8 @@ export class OutboxService {
     private readonly people: PeopleService,
     private readonly sender: OutboxSender,
     private readonly settings: Settings,
+    private readonly writes: WriteQueue,
+    private readonly ledger: LedgerService,
   ) {}
 
   async queue(mail: Mail, transaction: Transaction): Promise<void> {
@@ -53,8 +58,41 @@ export class OutboxService {
     transaction.afterCommit(() => this.sender.wake());
   }
 
-  find(states: OutboxRow['state'][], count: number, after?: string): Promise<OutboxRow[]> {
-    const where = { state: states, ...(after ? { id: { [Op.lt]: after } } : {}) };
+  find(state: OutboxRow['state'] | undefined, count: number, after?: string): Promise<OutboxRow[]> {
+    const where = { ...(state ? { state } : {}), ...(after ? { id: { [Op.lt]: after } } : {}) };
     return this.rows.findAll({ where, order: [['id', 'DESC']], limit: count });
+  }
+
+  count(state: OutboxRow['state'] | undefined): Promise<number> {
+    return this.rows.count({ where: state ? { state } : {} });
+  }
+
+  sendAgain(id: string, actorId: string): Promise<OutboxRow> {
+    return this.writes.run(async (transaction) => {
+      const row = await this.rows.findByPk(id, { transaction });
+      if (!row) throw notFound('Mail', id);
+      if (row.state !== 'failed') {
+        throw problem(
+          409,
+          'mail-not-failed',
+          'Only a failed mail can be sent again',
+          `This one is ${row.state}.`,
+        );
+      }
+      await row.update({ state: 'waiting', attempts: 0, nextAttemptAt: nowIso() }, { transaction });
+      const act = {
+        actorId,
+        verb: 'send-mail-again',
+        objectKind: 'mail',
+        objectId: id,
+        objectTitle: row.subject,
+      };
+      await this.ledger.record(
+        { ...act, summary: `Had the failed mail "${row.subject}" sent again` },
+        transaction,
+      );
+      transaction.afterCommit(() => this.sender.wake());
+      return row;
+    });
   }
 }

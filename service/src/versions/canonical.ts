@@ -28,7 +28,7 @@ function write(value: unknown, place: string): string {
   if (Array.isArray(value))
     return `[${value.map((item, index) => write(item, `${place}/${index}`)).join(',')}]`;
   if (isPlainObject(value)) return writeObject(value, place);
-  const shown = typeof value === 'object' ? Object.prototype.toString.call(value) : String(value);
+  const shown = typeof value === 'number' ? String(value) : Object.prototype.toString.call(value);
   throw new TypeError(`${place || '/'} is ${shown}, which has no canonical form.`);
 }
 

@@ -8,6 +8,7 @@ import { ConfigModule } from './config/config.module';
 import type { Settings } from './config/settings';
 import { DatabaseModule } from './database/database.module';
 import { DatasetsModule } from './datasets/datasets.module';
+import { EstimatesModule } from './estimates/estimates.module';
 import { FieldsModule } from './fields/fields.module';
 import { FilesModule } from './files/files.module';
 import { HealthModule } from './health/health.module';
@@ -38,6 +39,7 @@ export class AppModule {
         BackdropsModule,
         CalculatorsModule,
         DatasetsModule,
+        EstimatesModule,
         FieldsModule,
         FilesModule,
         HealthModule,

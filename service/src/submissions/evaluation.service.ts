@@ -97,6 +97,7 @@ export class Evaluations {
       rows: marked,
       metadata,
       formOffered: draft.formOffered,
+      kind,
       heldSites: await this.held.all(),
       limits: {},
       missingCodes,

@@ -1,0 +1,129 @@
+import { Injectable, type OnModuleInit } from '@nestjs/common';
+import { InjectModel } from '@nestjs/sequelize';
+import { previewEstimate } from '@siltlight/common/estimate/run-estimate';
+import type { EstimateRequest, EstimateResult } from '@siltlight/common/wire/estimates';
+import type { Person } from '../auth/policy';
+import { newId } from '../database/row';
+import { WriteQueue } from '../database/write-queue';
+import { JobsService } from '../jobs/jobs.service';
+import { LedgerService } from '../ledger/ledger.service';
+import { VersionsService } from '../versions/versions.service';
+import { computeApart } from './compute-apart';
+import { ESTIMATE, type EstimateContent } from './estimate-content';
+import { labelResult } from './label-result';
+import { EstimateRunRow } from './models/estimate-run-row';
+import { ResolveInputs } from './resolve-inputs.service';
+
+/** Raised when a change of the code moves a number, so that a record says what computed it. */
+export const CODE_VERSION = '0.1.0';
+
+const JOB = 'estimate';
+
+/** Asks for estimates and computes them as jobs. */
+@Injectable()
+export class EstimatesService implements OnModuleInit {
+  constructor(
+    @InjectModel(EstimateRunRow) private readonly runs: typeof EstimateRunRow,
+    private readonly inputs: ResolveInputs,
+    private readonly versions: VersionsService,
+    private readonly jobs: JobsService,
+    private readonly ledger: LedgerService,
+    private readonly writes: WriteQueue,
+  ) {}
+
+  onModuleInit(): void {
+    this.jobs.register(JOB, async ({ payload }, report, signal) => {
+      const { runId } = payload as { runId: string };
+      await this.compute(runId, report, signal);
+      return { resultPath: `/estimates/${runId}` };
+    });
+  }
+
+  /** Few members, the same central values: what a full run will say, at once. */
+  async preview(request: EstimateRequest): Promise<EstimateResult> {
+    const { inputs } = await this.inputs.resolve(request);
+    return labelResult(previewEstimate(inputs));
+  }
+
+  async request(
+    request: EstimateRequest,
+    by: Person,
+  ): Promise<{ id: string; jobId: string; jobPath: string }> {
+    const { title, pins } = await this.inputs.resolve(request);
+    const id = newId();
+    const job = await this.writes.run(async (transaction) => {
+      const last = await this.runs.max<number | null, EstimateRunRow>('runNumber', { transaction });
+      const run = await this.runs.create(
+        {
+          id,
+          runNumber: (last ?? 0) + 1,
+          title,
+          sliceSlug: pins.slice.slug,
+          request,
+          fieldVersionId: request.fieldVersionId,
+          createdBy: by.id,
+        },
+        { transaction },
+      );
+      const wanted = { kind: JOB, personId: by.id, payload: { runId: id }, title: `Estimate: ${title}` };
+      const queued = await this.jobs.request(wanted, transaction);
+      await run.update({ jobId: queued.id }, { transaction });
+      await this.ledger.record(
+        {
+          actorId: by.id,
+          verb: 'request-estimate',
+          objectKind: ESTIMATE,
+          objectId: id,
+          objectTitle: title,
+          summary: `Run ${run.runNumber} asked for: ${title}`,
+          after: request,
+        },
+        transaction,
+      );
+      return queued;
+    });
+    return { id, jobId: job.id, jobPath: `/api/v1/jobs/${job.id}` };
+  }
+
+  private async compute(
+    runId: string,
+    report: (progress: number, stage: string) => Promise<void>,
+    signal: AbortSignal,
+  ): Promise<void> {
+    const run = (await this.runs.findByPk(runId))!;
+    // Taken up again after a stop between the two last steps: the result is there already.
+    if (run.versionId !== null && run.versionId !== undefined) return;
+    await report(0.05, 'reading the pinned versions');
+    const { inputs, pins, title, invented } = await this.inputs.resolve(run.request);
+    await report(0.2, `computing ${inputs.ensemble.members} members`);
+    const result = labelResult(await computeApart(inputs, signal));
+    await report(0.9, 'keeping the result');
+    const content: EstimateContent = {
+      title,
+      invented,
+      codeVersion: CODE_VERSION,
+      request: run.request,
+      pins,
+      inputs,
+      result,
+    };
+    await this.writes.run(async (transaction) => {
+      signal.throwIfAborted();
+      const given = { kind: ESTIMATE, title, ownerId: run.createdBy, content, slug: `run-${run.runNumber}` };
+      const { version } = await this.versions.createObject(given, transaction);
+      await run.update({ versionId: version.id }, { transaction });
+      await this.ledger.record(
+        {
+          actorId: run.createdBy,
+          verb: 'compute-estimate',
+          objectKind: ESTIMATE,
+          objectId: run.id,
+          objectTitle: title,
+          summary: `Run ${run.runNumber} computed: ${title}`,
+          after: { checksum: version.checksum },
+        },
+        transaction,
+      );
+    });
+  }
+}

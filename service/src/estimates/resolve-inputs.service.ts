@@ -1,0 +1,140 @@
+import { Injectable } from '@nestjs/common';
+import type { EstimateInputs, SliceLight } from '@siltlight/common/estimate/estimate-inputs';
+import { usualParameters } from '@siltlight/common/estimate/usual-parameters';
+import type { EstimateRequest, OpticalSetView } from '@siltlight/common/wire/estimates';
+import { BackdropsService } from '../backdrops/backdrops.service';
+import type { FieldContent } from '../fields/field-content';
+import { FieldsService } from '../fields/fields.service';
+import { problem } from '../http/problem';
+import { OpticalSetsService } from '../optics/optical-sets.service';
+import { SlicesService, type SliceVersion } from '../slices/slices.service';
+import type { EstimatePins } from './estimate-content';
+
+export interface ResolvedEstimate {
+  inputs: EstimateInputs;
+  pins: EstimatePins;
+  title: string;
+  invented: boolean;
+}
+
+/** Looks up everything that a request names; what comes out is all that the computation needs. */
+@Injectable()
+export class ResolveInputs {
+  constructor(
+    private readonly fields: FieldsService,
+    private readonly sets: OpticalSetsService,
+    private readonly backdrops: BackdropsService,
+    private readonly slices: SlicesService,
+  ) {}
+
+  async resolve(request: EstimateRequest): Promise<ResolvedEstimate> {
+    const field = await this.fields.get(request.fieldVersionId);
+    const [opticalSet, backdrop, slice, reference] = await Promise.all([
+      this.sets.get(request.opticalSetVersionId),
+      this.backdrops.get(request.backdropVersionId),
+      this.slices.get(field.content.slice.versionId),
+      this.slices.get(field.content.reference.versionId),
+    ]);
+    const { content } = field;
+    return {
+      title: request.title ?? `${content.slice.name} against ${content.reference.name.toLowerCase()}`,
+      invented: content.invented,
+      pins: {
+        slice: { ...pinOf(slice, content.slice.name), slug: content.slice.slug },
+        reference: { ...pinOf(reference, content.reference.name), slug: content.reference.slug },
+        field: pinOf(field, content.title),
+        opticalSet,
+        backdrop: { versionId: backdrop.versionId, checksum: backdrop.checksum, title: backdrop.title },
+        datasetVersions: content.datasetVersions,
+      },
+      inputs: {
+        slice: lightOf(slice),
+        reference: lightOf(reference),
+        field: fieldInputs(content),
+        optics: {
+          singleScatteringAlbedo: opticalSet.singleScatteringAlbedo.central,
+          asymmetry: opticalSet.asymmetry.central,
+          massExtinctionM2PerG: opticalSet.massExtinctionM2PerG.central,
+        },
+        backdrop: backdrop.bands,
+        transmittance: request.transmittance,
+        method: request.method,
+        ...shortwaveEfficiency(request),
+        longwave: request.longwave.on ? { efficiencyWm2: request.longwave.efficiencyWm2, sky: 'all' } : null,
+        ensemble: {
+          members: request.members,
+          seed: request.seed,
+          varyRatios: true,
+          parameters: parametersOf(request, opticalSet),
+        },
+      },
+    };
+  }
+}
+
+const pinOf = ({ id, checksum }: { id: string; checksum: string }, title: string) => ({
+  versionId: id,
+  checksum,
+  title,
+});
+
+const lightOf = ({ content }: SliceVersion): SliceLight => ({
+  name: content.name,
+  orbit: content.orbit,
+  solarConstantWm2: content.solarConstantWm2,
+});
+
+function fieldInputs(content: FieldContent): EstimateInputs['field'] {
+  return {
+    base: content.baseField,
+    regions: content.regions.map(({ code, lnRatio, sharedLoad, ownSe, siteCount, status, hatched }) => ({
+      code,
+      lnRatio,
+      sharedLoad,
+      ownSe,
+      siteCount,
+      status,
+      hatched,
+    })),
+    global: {
+      lnRatio: content.global.lnRatio,
+      sharedLoad: 1,
+      ownSe: Math.sqrt(content.diagnostics.tauSquared),
+    },
+    sharedSe: content.sharedSe,
+  };
+}
+
+function shortwaveEfficiency({
+  method,
+  shortwaveEfficiencyWm2,
+}: EstimateRequest): Pick<EstimateInputs, 'shortwaveEfficiency'> {
+  if (method !== 'efficiency') return {};
+  if (shortwaveEfficiencyWm2 !== undefined)
+    return { shortwaveEfficiency: { efficiencyWm2: shortwaveEfficiencyWm2, sky: 'all' } };
+  const message = 'The method "efficiency" needs a shortwave efficiency in W m⁻² per unit optical depth.';
+  throw problem(422, 'missing', 'The shortwave efficiency is missing', message, [
+    {
+      pointer: '/shortwaveEfficiencyWm2',
+      field: 'shortwaveEfficiencyWm2',
+      unit: 'W m⁻² per unit optical depth',
+      allowed: [-200, 200],
+      message,
+    },
+  ]);
+}
+
+function parametersOf(
+  request: EstimateRequest,
+  { singleScatteringAlbedo, asymmetry, source }: OpticalSetView,
+) {
+  return usualParameters({
+    optics: { singleScatteringAlbedo, asymmetry, source },
+    transmittance: request.transmittance,
+    method: request.method,
+    ...(request.shortwaveEfficiencyWm2 === undefined
+      ? {}
+      : { shortwaveEfficiencyWm2: request.shortwaveEfficiencyWm2 }),
+    longwaveEfficiencyWm2: request.longwave.on ? request.longwave.efficiencyWm2 : null,
+  });
+}

@@ -56,7 +56,7 @@ export async function rasterise(svg: string, widthPx: number, heightPx: number):
   }
 }
 
-export const blobOf = (canvas: HTMLCanvasElement) =>
+const blobOf = (canvas: HTMLCanvasElement) =>
   new Promise<Blob>((resolve, reject) =>
     canvas.toBlob(
       (blob) => (blob ? resolve(blob) : reject(new Error('The browser made no picture.'))),

@@ -1,4 +1,4 @@
-import { blobOf } from '../figure/picture';
+import { rasterise } from '../figure/picture';
 import type { MapData } from './map-data';
 import { echarts } from './map-engine';
 import { colouringOf, mapOption, partsOf } from './map-option';
@@ -21,24 +21,8 @@ export async function drawMap(kind: 'png' | 'svg', data: MapData): Promise<Blob>
     });
     const svg = chart.renderToSVGString();
     if (kind === 'svg') return new Blob([svg], { type: 'image/svg+xml' });
-    return await rasteriseMap(svg, WIDTH_PX, height);
+    return await rasterise(svg, WIDTH_PX, height);
   } finally {
     chart.dispose();
-  }
-}
-
-async function rasteriseMap(svg: string, width: number, height: number): Promise<Blob> {
-  const address = URL.createObjectURL(new Blob([svg], { type: 'image/svg+xml' }));
-  try {
-    const image = new Image(width, height);
-    image.src = address;
-    await image.decode();
-    const canvas = document.createElement('canvas');
-    canvas.width = width;
-    canvas.height = height;
-    canvas.getContext('2d')!.drawImage(image, 0, 0, width, height);
-    return await blobOf(canvas);
-  } finally {
-    URL.revokeObjectURL(address);
   }
 }

@@ -8,7 +8,10 @@ import { ConfigModule } from './config/config.module';
 import type { Settings } from './config/settings';
 import { DatabaseModule } from './database/database.module';
 import { DatasetsModule } from './datasets/datasets.module';
+import { DemoModule } from './demo/demo.module';
+import { DeskModule } from './desk/desk.module';
 import { EstimatesModule } from './estimates/estimates.module';
+import { ExportsModule } from './exports/exports.module';
 import { FieldsModule } from './fields/fields.module';
 import { FilesModule } from './files/files.module';
 import { HealthModule } from './health/health.module';
@@ -39,7 +42,10 @@ export class AppModule {
         BackdropsModule,
         CalculatorsModule,
         DatasetsModule,
+        DemoModule,
+        DeskModule,
         EstimatesModule,
+        ExportsModule,
         FieldsModule,
         FilesModule,
         HealthModule,

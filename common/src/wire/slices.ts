@@ -94,7 +94,7 @@ export const sliceDetail = z.object({
 });
 export type SliceDetail = z.infer<typeof sliceDetail>;
 
-export const fieldRequest = z.object({
+export const fieldRequest = z.strictObject({
   sliceSlug: z.string().max(80),
   way: z.literal('regional-scaling'),
   datasetVersionIds: z.array(z.string().max(64)).min(1, 'Pick at least one dataset version.').max(200),

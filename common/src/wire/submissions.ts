@@ -33,6 +33,10 @@ export const columnProposal = z.object({
   unit: z.string().max(80).nullable(),
   confidence: z.number().min(0).max(1),
   reason: z.string().max(1000),
+  /** of a flux: dust, or the tracer */
+  quantity: z.string().max(60).optional(),
+  /** index in `tables`, only where tables of one sheet have different columns */
+  table: z.number().int().min(0).max(199).optional(),
 });
 
 export const tableConstant = z.object({
@@ -42,9 +46,10 @@ export const tableConstant = z.object({
   unit: z.string().max(80).nullable(),
   cell: z.string().max(12).nullable(),
   reason: z.string().max(1000),
+  table: z.number().int().min(0).max(199).optional(),
 });
 
-export const mappingSchema = z.object({
+export const mappingSchema = z.strictObject({
   tables: z.array(tableProposal).max(200),
   columns: z.array(columnProposal).max(2000),
   constants: z.array(tableConstant).max(500),
@@ -227,7 +232,7 @@ export const gridQuery = z.object({
   limit: z.coerce.number().int().min(1).max(500).default(200),
 });
 
-export const correctionsRequest = z.object({
+export const correctionsRequest = z.strictObject({
   corrections: z
     .array(
       z.object({
@@ -245,21 +250,21 @@ export const rowPlaces = z
   .array(z.object({ sheet: z.string().max(200), row: z.number().int().min(1).max(1_000_001) }))
   .min(1)
   .max(5000);
-export const leaveOutRequest = z.object({ rows: rowPlaces, reason: reasonText });
-export const takeBackRequest = z.object({ rows: rowPlaces });
-export const waiverRequest = z.object({
+export const leaveOutRequest = z.strictObject({ rows: rowPlaces, reason: reasonText });
+export const takeBackRequest = z.strictObject({ rows: rowPlaces });
+export const waiverRequest = z.strictObject({
   findingKeys: z.array(z.string().max(500)).min(1).max(2000),
   reason: reasonText,
 });
-export const queryRequest = z.object({
+export const queryRequest = z.strictObject({
   sheet: z.string().max(200),
   row: z.number().int().min(1),
   column: z.string().regex(/^[A-Z]{1,3}$/),
   text: z.string().trim().min(3).max(4000),
 });
-export const replyRequest = z.object({ text: z.string().trim().min(1).max(4000) });
+export const replyRequest = z.strictObject({ text: z.string().trim().min(1).max(4000) });
 export const decisionRequest = z
-  .object({
+  .strictObject({
     decision: z.enum(['approve', 'return', 'decline']),
     /** wanted for return and decline */
     reason: z.string().trim().max(4000).optional(),
@@ -271,7 +276,7 @@ export const decisionRequest = z
     path: ['reason'],
     message: 'Say why: the contributor reads this.',
   });
-export const withdrawRequest = z.object({ reason: reasonText });
+export const withdrawRequest = z.strictObject({ reason: reasonText });
 export const submissionsQuery = z.object({
   state: submissionState.optional(),
   mine: z.enum(['true', 'false']).optional(),

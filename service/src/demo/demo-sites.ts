@@ -84,3 +84,26 @@ export const demoSheets: DemoSheet[] = [
     sites: ice,
   },
 ];
+
+/** Waits in the queue, with warnings to look at. */
+export const queuedSheet: DemoSheet = {
+  fileName: 'invented_eastern_plain.csv',
+  title: 'Loess sections of the eastern plain (invented)',
+  archive: 'loess',
+  fluxUnit: 'g m-2 yr-1',
+  unitsPerCanonical: 1,
+  sites: [
+    { site: 'Plain E-1', latitudeDeg: 46.5, longitudeDeg: 36, recentFlux: 19, glacialRatio: 5.1 },
+    { site: 'Plain E-2', latitudeDeg: 47.2, longitudeDeg: 38.4, recentFlux: 24, glacialRatio: 4.6 },
+  ],
+};
+
+/** Was returned to its contributor with a query. */
+export const returnedSheet: DemoSheet = {
+  fileName: 'invented_southern_cores.csv',
+  title: 'Southern cores of cruise QY (invented)',
+  archive: 'marine',
+  fluxUnit: 'g cm-2 kyr-1',
+  unitsPerCanonical: 0.1,
+  sites: [{ site: 'QY-01', latitudeDeg: -47.83, longitudeDeg: 148.62, recentFlux: 0.31, glacialRatio: 2.8 }],
+};

@@ -46,6 +46,13 @@ export class EstimateViews {
     return loaded;
   }
 
+  /** For work of the service itself, on behalf of somebody who was allowed to ask for it. */
+  async byId(id: string): Promise<LoadedRun> {
+    const run = await this.runs.findByPk(id);
+    if (!run) throw notFound('Estimate', id);
+    return this.withVersion(run);
+  }
+
   async withVersion(run: EstimateRunRow): Promise<LoadedRun> {
     if (run.versionId) {
       const version = await this.versions.get<EstimateContent>(run.versionId);

@@ -2,6 +2,7 @@ import { Injectable, type OnModuleInit } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
 import { previewEstimate } from '@siltlight/common/estimate/run-estimate';
 import type { EstimateRequest, EstimateResult } from '@siltlight/common/wire/estimates';
+import type { Transaction } from 'sequelize';
 import type { Person } from '../auth/policy';
 import { newId } from '../database/row';
 import { WriteQueue } from '../database/write-queue';
@@ -52,37 +53,51 @@ export class EstimatesService implements OnModuleInit {
     const { title, pins } = await this.inputs.resolve(request);
     const id = newId();
     const job = await this.writes.run(async (transaction) => {
-      const last = await this.runs.max<number | null, EstimateRunRow>('runNumber', { transaction });
-      const run = await this.runs.create(
-        {
-          id,
-          runNumber: (last ?? 0) + 1,
-          title,
-          sliceSlug: pins.slice.slug,
-          request,
-          fieldVersionId: request.fieldVersionId,
-          createdBy: by.id,
-        },
-        { transaction },
-      );
+      const run = await this.createRun({ id, title, sliceSlug: pins.slice.slug, request, by }, transaction);
       const wanted = { kind: JOB, personId: by.id, payload: { runId: id }, title: `Estimate: ${title}` };
       const queued = await this.jobs.request(wanted, transaction);
       await run.update({ jobId: queued.id }, { transaction });
-      await this.ledger.record(
-        {
-          actorId: by.id,
-          verb: 'request-estimate',
-          objectKind: ESTIMATE,
-          objectId: id,
-          objectTitle: title,
-          summary: `Run ${run.runNumber} asked for: ${title}`,
-          after: request,
-        },
-        transaction,
-      );
       return queued;
     });
     return { id, jobId: job.id, jobPath: `/api/v1/jobs/${job.id}` };
+  }
+
+  /** The same without a job, for the invented scenario, which is made before anybody can wait for it. */
+  async runNow(request: EstimateRequest, by: Person): Promise<string> {
+    const { title, pins } = await this.inputs.resolve(request);
+    const id = newId();
+    await this.writes.run((transaction) =>
+      this.createRun({ id, title, sliceSlug: pins.slice.slug, request, by }, transaction),
+    );
+    await this.compute(id, () => Promise.resolve(), new AbortController().signal);
+    return id;
+  }
+
+  private async createRun(
+    given: { id: string; title: string; sliceSlug: string; request: EstimateRequest; by: Person },
+    transaction: Transaction,
+  ): Promise<EstimateRunRow> {
+    const { id, title, sliceSlug, request, by } = given;
+    const last = await this.runs.max<number | null, EstimateRunRow>('runNumber', { transaction });
+    const runNumber = (last ?? 0) + 1;
+    const run = await this.runs.create(
+      { id, runNumber, title, sliceSlug, request, fieldVersionId: request.fieldVersionId, createdBy: by.id },
+      { transaction },
+    );
+    const summary = `Run ${runNumber} asked for: ${title}`;
+    await this.ledger.record(
+      {
+        actorId: by.id,
+        verb: 'request-estimate',
+        objectKind: ESTIMATE,
+        objectId: id,
+        objectTitle: title,
+        summary,
+        after: request,
+      },
+      transaction,
+    );
+    return run;
   }
 
   private async compute(

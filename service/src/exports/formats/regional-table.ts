@@ -1,0 +1,146 @@
+import type { EstimateRegionResult, ForcingTriple } from '@siltlight/common/wire/estimates';
+import { type CsvCell, csvTable } from '../../http/csv';
+import { type ExportSubject, standing } from '../export-subject';
+
+interface Column {
+  name: string;
+  title: string;
+  type: 'string' | 'number' | 'integer' | 'boolean';
+  unit?: string;
+}
+
+const PARTS = [
+  ['shortwaveWm2', 'sw'],
+  ['longwaveWm2', 'lw'],
+  ['netWm2', 'net'],
+] as const;
+
+const KINDS = [
+  ['forcing', 'forcing, slice minus reference'],
+  ['direct_effect', 'direct radiative effect of the slice, against no dust'],
+] as const;
+
+const forcingColumns: Column[] = KINDS.flatMap(([kind, kindTitle]) =>
+  PARTS.flatMap(([, part]) =>
+    ['central', 'p05', 'p95'].map((bound) => ({
+      name: `${kind}_${part}_${bound}_W_m2`,
+      title: `${kindTitle}; ${part.toUpperCase()}, all sky, top of atmosphere; ${bound === 'central' ? 'central inputs' : bound === 'p05' ? '5th percentile' : '95th percentile'}`,
+      type: 'number' as const,
+      unit: 'W m-2',
+    })),
+  ),
+);
+
+/** One declaration drives the table and its descriptor. */
+export const REGIONAL_COLUMNS: readonly Column[] = [
+  { name: 'slice', title: 'time slice', type: 'string' },
+  { name: 'reference', title: 'reference slice', type: 'string' },
+  { name: 'region_code', title: 'AR6 reference region; GLOBAL for the global mean', type: 'string' },
+  { name: 'region_name', title: 'name of the region', type: 'string' },
+  { name: 'area_share', title: 'share of the sphere', type: 'number', unit: '1' },
+  { name: 'site_count', title: 'sites with a flux in both windows', type: 'integer' },
+  { name: 'ratio_from', title: 'sites, shrunk towards the global mean, or the global ratio', type: 'string' },
+  { name: 'few_sites', title: 'fewer than three sites', type: 'boolean' },
+  {
+    name: 'dust_optical_depth_550nm_slice',
+    title: 'dust optical depth at 550 nm, slice',
+    type: 'number',
+    unit: '1',
+  },
+  {
+    name: 'dust_optical_depth_550nm_reference',
+    title: 'dust optical depth at 550 nm, reference',
+    type: 'number',
+    unit: '1',
+  },
+  ...forcingColumns,
+];
+
+/** Regional time-slice table: a heading row, then the globe, then the regions in table order. */
+export function regionalTableCsv({ content }: ExportSubject): string {
+  const { global, regions, label } = content.result;
+  const head: CsvCell[] = [label.sliceName, label.referenceName];
+  const globe = [
+    ...head,
+    'GLOBAL',
+    'Global mean',
+    1,
+    null,
+    '',
+    '',
+    global.opticalDepthSlice,
+    global.opticalDepthReference,
+    ...triple(global.forcing),
+    ...triple(global.directEffect),
+  ];
+  return csvTable([
+    REGIONAL_COLUMNS.map(({ name }) => name),
+    globe,
+    ...regions.map((region) => [...head, ...regionCells(region)]),
+  ]);
+}
+
+function regionCells(region: EstimateRegionResult): CsvCell[] {
+  const { code, name, areaShare, siteCount, status, hatched } = region;
+  const ratioFrom = { sites: 'sites', shrunk: 'shrunk', global: 'global ratio' }[status];
+  return [
+    code,
+    name,
+    areaShare,
+    siteCount,
+    ratioFrom,
+    hatched ? 'true' : 'false',
+    region.opticalDepthSlice,
+    region.opticalDepthReference,
+    ...triple(region.forcing),
+    ...triple(region.directEffect),
+  ];
+}
+
+function triple(values: ForcingTriple): CsvCell[] {
+  return PARTS.flatMap(([part]) => {
+    const { value, low, high } = values[part];
+    return [value, low, high];
+  });
+}
+
+/** Frictionless Data Package of the table: names, types, units, missing values, where it came from. */
+export function regionalTableDescriptor(
+  subject: ExportSubject,
+  file: { fileName: string; sha256: string; bytes: number },
+) {
+  const { content, runNumber, checksum } = subject;
+  return {
+    profile: 'tabular-data-package',
+    name: `siltlight-run-${runNumber}`,
+    title: content.title,
+    description: standing(subject),
+    sources: content.pins.datasetVersions.map((pin) => ({
+      title: `dataset version ${pin.versionId}`,
+      sha256: pin.checksum,
+    })),
+    'siltlight:estimateChecksum': checksum,
+    resources: [
+      {
+        name: 'regional-table',
+        path: file.fileName,
+        profile: 'tabular-data-resource',
+        format: 'csv',
+        mediatype: 'text/csv',
+        encoding: 'utf-8',
+        bytes: file.bytes,
+        hash: `sha256:${file.sha256}`,
+        schema: {
+          fields: REGIONAL_COLUMNS.map(({ name, title, type, unit }) => ({
+            name,
+            title,
+            type,
+            ...(unit ? { unit } : {}),
+          })),
+          missingValues: [''],
+          primaryKey: ['slice', 'reference', 'region_code'],
+        },
+      },
+    ],
+  };
+}

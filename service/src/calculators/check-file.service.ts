@@ -1,4 +1,3 @@
-import * as fs from 'node:fs/promises';
 import { Injectable } from '@nestjs/common';
 import { datasetKind } from '@siltlight/common/dataset/kinds';
 import type { SampleRow } from '@siltlight/common/dataset/sample-row';
@@ -6,6 +5,7 @@ import type { Mapping } from '@siltlight/common/sheet/mapping';
 import { proposeWorkbook } from '@siltlight/common/sheet/propose';
 import type { DatasetKindId } from '@siltlight/common/wire/submissions';
 import { Evaluations } from '../submissions/evaluation.service';
+import { requireFits } from '../submissions/mapping-fits';
 import { readUpload } from '../workers/upload-reader';
 
 /** Held to less than a submission: nothing is kept that would justify more. */
@@ -22,7 +22,7 @@ const CHECK_LIMITS = {
 
 export interface CheckRequest {
   kind: DatasetKindId;
-  mapping?: (Pick<Mapping, 'tables' | 'columns'> & Partial<Pick<Mapping, 'constants'>>) | undefined;
+  mapping?: Partial<Mapping> | undefined;
   offset: number;
   limit: number;
 }
@@ -33,43 +33,37 @@ export class CheckFile {
   constructor(private readonly evaluations: Evaluations) {}
 
   async check(file: { path: string; fileName: string }, request: CheckRequest) {
-    try {
-      const workbook = await readUpload({
-        ...file,
-        limits: CHECK_LIMITS,
-      });
-      const proposal = proposeWorkbook(workbook, datasetKind(request.kind));
-      const mapping: Mapping = { ...proposal, ...request.mapping };
-      const { rows, findings, counts } = await this.evaluations.evaluate({
-        workbook,
-        kind: request.kind,
-        mapping,
-        metadata: {},
-        corrections: [],
-        leftOut: [],
-        waivedKeys: new Set(),
-        formOffered: false,
-      });
-      const { offset, limit } = request;
-      return {
-        tables: mapping.tables,
-        columns: mapping.columns,
-        rows: rows.slice(offset, offset + limit).map(rowOf),
-        findings: findings.map(({ code, slug, severity, sheet, row, column, message, remedy }) => ({
-          code,
-          slug,
-          severity,
-          sheet,
-          row,
-          column,
-          message,
-          remedy,
-        })),
-        counts: { rows: counts.rows, errors: counts.errors, warnings: counts.warnings, notes: counts.notes },
-      };
-    } finally {
-      await fs.rm(file.path, { force: true });
-    }
+    const workbook = await readUpload({ ...file, limits: CHECK_LIMITS });
+    const proposal = proposeWorkbook(workbook, datasetKind(request.kind));
+    const mapping: Mapping = { ...proposal, ...request.mapping };
+    requireFits(mapping, workbook, '/mapping');
+    const { rows, findings, counts } = await this.evaluations.evaluate({
+      workbook,
+      kind: request.kind,
+      mapping,
+      metadata: {},
+      corrections: [],
+      leftOut: [],
+      waivedKeys: new Set(),
+      formOffered: false,
+    });
+    const { offset, limit } = request;
+    return {
+      tables: mapping.tables,
+      columns: mapping.columns,
+      rows: rows.slice(offset, offset + limit).map(rowOf),
+      findings: findings.map(({ code, slug, severity, sheet, row, column, message, remedy }) => ({
+        code,
+        slug,
+        severity,
+        sheet,
+        row,
+        column,
+        message,
+        remedy,
+      })),
+      counts: { rows: counts.rows, errors: counts.errors, warnings: counts.warnings, notes: counts.notes },
+    };
   }
 }
 

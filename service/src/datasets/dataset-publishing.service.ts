@@ -9,7 +9,7 @@ import { DATASET, type DatasetContent } from './dataset-content';
 import { DatasetDependants } from './dataset-dependants';
 import { SamplesService } from './samples.service';
 
-/** Makes dataset versions and withdraws them. Each act joins the caller's write. */
+/** Makes dataset versions and withdraws them, inside the caller's write. */
 @Injectable()
 export class DatasetPublishing {
   constructor(
@@ -21,7 +21,7 @@ export class DatasetPublishing {
 
   /**
    * Publishes vetted content as version 1 of a new dataset, or as the next version of the named one; what rests on
-   * the version before it becomes stale.
+   * the version before it becomes stale. The caller's act, an approval, writes the ledger row of both.
    */
   async publish(
     content: DatasetContent,
@@ -45,18 +45,6 @@ export class DatasetPublishing {
       const reason = `${content.title}: version ${before.number} was superseded by version ${published.number}`;
       await this.dependants.markStale(before.id, reason, transaction);
     }
-    await this.ledger.record(
-      {
-        actorId: by.id,
-        verb: 'publish-dataset',
-        objectKind: DATASET,
-        objectId: published.objectId,
-        objectTitle: content.title,
-        summary: `Version ${published.number} of ${content.title} published: ${content.samples.length} samples`,
-        after: { versionId: published.id, checksum: published.checksum, samples: content.samples.length },
-      },
-      transaction,
-    );
     return published;
   }
 

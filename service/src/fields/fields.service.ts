@@ -1,15 +1,16 @@
 import { Injectable, type OnModuleInit } from '@nestjs/common';
-import type { FieldDetail } from '@siltlight/common/wire/slices';
+import type { FieldDetail, fieldRequest } from '@siltlight/common/wire/slices';
+import type { Transaction } from 'sequelize';
 import type { z } from 'zod';
-import type { fieldRequest } from '@siltlight/common/wire/slices';
 import type { Person } from '../auth/policy';
 import { WriteQueue } from '../database/write-queue';
+import { DATASET } from '../datasets/dataset-content';
 import { DatasetDependants } from '../datasets/dataset-dependants';
 import { DatasetsService } from '../datasets/datasets.service';
 import { SamplesService } from '../datasets/samples.service';
-import { notFound, problem } from '../http/problem';
+import { notFound, problem, type Problem } from '../http/problem';
 import { LedgerService } from '../ledger/ledger.service';
-import { SlicesService } from '../slices/slices.service';
+import { SlicesService, type SliceVersion } from '../slices/slices.service';
 import type { Version } from '../versions/version';
 import { VersionsService } from '../versions/versions.service';
 import { buildField, type FieldIngredients } from './build-field';
@@ -62,6 +63,7 @@ export class FieldsService implements OnModuleInit {
   async build(request: FieldRequest, by: Person): Promise<FieldDetail> {
     const content = buildField(await this.ingredients(request));
     const version = await this.writes.run(async (transaction) => {
+      await this.requireInForce(content, transaction);
       const given = { kind: FIELD, title: content.title, ownerId: by.id, content };
       const { version: draft } = await this.versions.createObject(given, transaction);
       const published = await this.versions.publish<FieldContent>(draft.id, by.id, transaction);
@@ -116,7 +118,7 @@ export class FieldsService implements OnModuleInit {
   }
 
   private async ingredients(request: FieldRequest): Promise<FieldIngredients> {
-    const slice = await this.slices.bySlug(request.sliceSlug);
+    const slice = await this.slice(request.sliceSlug);
     const reference = await this.slices.referenceOf(slice);
     if (!reference) {
       throw problem(
@@ -135,39 +137,67 @@ export class FieldsService implements OnModuleInit {
       );
     }
     const datasetVersions = await Promise.all(
-      request.datasetVersionIds.map((versionId, index) => this.usable(versionId, index)),
+      [...new Set(request.datasetVersionIds)].map((versionId, index) => this.usable(versionId, index)),
     );
-    const samples = await this.samples.ofVersions(request.datasetVersionIds);
+    const samples = await this.samples.ofVersions(datasetVersions.map(({ versionId }) => versionId));
     const title =
       request.title ??
       `${slice.content.name} over ${reference.content.name}, ${datasetVersions.length} datasets`;
     return { title, slice, reference, datasetVersions, samples, sizeCutoff: request.sizeCutoff };
   }
 
+  private async slice(slug: string): Promise<SliceVersion> {
+    const slice = await this.slices.find(slug);
+    if (slice) return slice;
+    throw refused('no-such-slice', 'There is no such slice', `No slice has the address ${slug}.`, {
+      pointer: '/sliceSlug',
+      field: 'sliceSlug',
+      value: slug,
+    });
+  }
+
   private async usable(versionId: string, index: number) {
-    const version = await this.datasets.byVersionId(versionId);
-    const wrong =
-      version.object.kind !== 'dataset'
-        ? 'This is not a dataset version.'
-        : version.state !== 'published'
-          ? `This version is ${version.state}; take the one in force.`
-          : null;
-    if (wrong) {
-      throw problem(
-        422,
+    const place = { pointer: `/datasetVersionIds/${index}`, field: 'datasetVersionIds', value: versionId };
+    const [summary] = await this.versions.list(DATASET, { ids: [versionId] });
+    if (!summary) {
+      throw refused(
         'dataset-version-unusable',
         'A dataset version cannot be used',
-        `${version.object.title}, version ${version.number}: ${wrong}`,
-        [
-          {
-            pointer: `/datasetVersionIds/${index}`,
-            field: 'datasetVersionIds',
-            value: versionId,
-            message: wrong,
-          },
-        ],
+        'There is no such dataset version.',
+        place,
       );
     }
-    return { versionId, checksum: version.checksum, invented: version.content.invented };
+    if (summary.state !== 'published') {
+      throw refused(
+        'dataset-version-unusable',
+        'A dataset version cannot be used',
+        `${summary.object.title}, version ${summary.number}, is ${summary.state}; take the one in force.`,
+        place,
+      );
+    }
+    const { checksum, content } = await this.datasets.byVersionId(versionId);
+    return { versionId, checksum, invented: content.invented };
   }
+
+  /** A dataset version may have been superseded while the field was computed: then nobody would mark it as stale. */
+  private async requireInForce({ datasetVersions }: FieldContent, transaction: Transaction): Promise<void> {
+    const ids = datasetVersions.map(({ versionId }) => versionId);
+    const inForce = await this.versions.list(DATASET, { ids, states: ['published'] }, transaction);
+    if (inForce.length === ids.length) return;
+    throw problem(
+      409,
+      'dataset-changed-meanwhile',
+      'A dataset version was replaced meanwhile',
+      'One of the dataset versions was superseded or withdrawn while the field was computed. Pick the version in force and build again.',
+    );
+  }
+}
+
+function refused(
+  code: string,
+  title: string,
+  message: string,
+  place: { pointer: string; field: string; value: string },
+): Problem {
+  return problem(422, code, title, message, [{ ...place, message }]);
 }

@@ -6,14 +6,14 @@ import type { z } from 'zod';
 import type { Person } from '../auth/policy';
 import { nowIso } from '../database/row';
 import { type DatasetContent, sampleOf } from '../datasets/dataset-content';
+import type { DatasetVersion } from '../datasets/datasets.service';
 import { DatasetPublishing } from '../datasets/dataset-publishing.service';
 import { problem } from '../http/problem';
 import { OutboxService } from '../notifications/outbox.service';
 import { Evaluations } from '../submissions/evaluation.service';
-import type { Editing } from '../submissions/mending.service';
 import { numberText, type SubmissionRow } from '../submissions/models/submission-row';
 import { DecisionRow } from '../submissions/models/working-rows';
-import { SubmissionChanges } from '../submissions/submission-changes.service';
+import { type Editing, SubmissionChanges } from '../submissions/submission-changes.service';
 import { PeopleService } from '../users/people.service';
 import { requireReviewer, Review } from './review.service';
 
@@ -36,20 +36,20 @@ export class Decisions {
 
   decide(editing: Editing, decision: Decision): Promise<SubmissionRow> {
     const outcome = OUTCOME[decision.decision];
+    let dataset: DatasetVersion | null = null;
     const change = {
       ...editing,
       step: decision.decision,
       verb: `${decision.decision}-submission`,
       summary: () => (decision.reason ? `${outcome}: ${decision.reason}` : outcome),
-      after: decision,
+      after: () => ({ ...decision, ...(dataset ? { dataset: markOf(dataset) } : {}) }),
     };
     return this.changes.run(change, async (submission, transaction) => {
       await this.review.requireFourEyes(submission, editing.by, transaction);
       requireReviewer(submission, editing.by);
-      const dataset =
-        decision.decision === 'approve'
-          ? await this.publish(submission, decision, editing.by, transaction)
-          : null;
+      if (decision.decision === 'approve') {
+        dataset = await this.publish(submission, decision, editing.by, transaction);
+      }
       await submission.update(
         {
           state: outcome,
@@ -124,6 +124,13 @@ export class Decisions {
     );
   }
 }
+
+const markOf = ({ id, number, checksum, object }: DatasetVersion) => ({
+  slug: object.slug,
+  versionId: id,
+  number,
+  checksum,
+});
 
 function requireSettled({ counts, number }: SubmissionRow): void {
   if (counts.errors === 0 && counts.openWarnings === 0) return;

@@ -3,7 +3,6 @@ import { ApiOperation } from '@nestjs/swagger';
 import type { SubmissionDetail } from '@siltlight/common/wire/submissions';
 import { type Person, Roles, SignedIn } from '../auth/policy';
 import type { SubmissionRow } from '../submissions/models/submission-row';
-import { SubmissionAccess } from '../submissions/submission-access.service';
 import { SubmissionViews } from '../submissions/submission-views.service';
 import { Decisions } from './decisions.service';
 import { DecisionDto, QueryDto, ReplyDto, WaiverDto } from './dto';
@@ -15,7 +14,6 @@ export class ReviewController {
   constructor(
     private readonly review: Review,
     private readonly decisions: Decisions,
-    private readonly access: SubmissionAccess,
     private readonly views: SubmissionViews,
   ) {}
 
@@ -65,16 +63,14 @@ export class ReviewController {
   @HttpCode(200)
   @Roles('scientist', 'steward')
   @ApiOperation({ summary: 'Answer a query' })
-  async reply(
+  reply(
     @Param('id') id: string,
     @Param('queryId') queryId: string,
     @Headers('if-match') ifMatch: string,
     @Body() body: ReplyDto,
     @SignedIn() by: Person,
   ) {
-    const { contributorId } = await this.access.visible(id, by);
-    const step = contributorId === by.id ? ('edit' as const) : ('examine' as const);
-    return this.answer(this.review.reply({ id, ifMatch, by, step }, queryId, body.text), by);
+    return this.answer(this.review.reply({ id, ifMatch, by }, queryId, body.text), by);
   }
 
   @Post('decision')

@@ -4,12 +4,11 @@ import type { Transaction } from 'sequelize';
 import type { Person } from '../auth/policy';
 import { notFound, problem } from '../http/problem';
 import { OutboxService } from '../notifications/outbox.service';
-import { Evaluations } from '../submissions/evaluation.service';
-import type { Editing } from '../submissions/mending.service';
+import { type Draft, Evaluations } from '../submissions/evaluation.service';
 import { numberText, type SubmissionRow } from '../submissions/models/submission-row';
 import { QueryRow, ReplyRow, WaiverRow } from '../submissions/models/working-rows';
 import { SubmissionAccess } from '../submissions/submission-access.service';
-import { SubmissionChanges } from '../submissions/submission-changes.service';
+import { type Editing, SubmissionChanges } from '../submissions/submission-changes.service';
 
 /** What stewards do before they decide: take, let go, waive warnings, ask. */
 @Injectable()
@@ -56,12 +55,15 @@ export class Review {
       step: 'examine' as const,
       verb: 'waive-warnings',
       summary: () => `${findingKeys.length} warnings waived: ${reason}`,
-      after: { findingKeys, reason },
+      after: () => ({ findingKeys, reason }),
+      amend: async (draft: Draft, submission: SubmissionRow) => {
+        await this.requireFourEyes(submission, editing.by);
+        requireReviewer(submission, editing.by);
+        await this.requireWarnings(submission, findingKeys);
+        return { ...draft, waivedKeys: new Set([...draft.waivedKeys, ...findingKeys]) };
+      },
     };
     return this.changes.run(change, async (submission, transaction) => {
-      await this.requireFourEyes(submission, editing.by, transaction);
-      requireReviewer(submission, editing.by);
-      await this.requireWarnings(submission, findingKeys);
       for (const findingKey of findingKeys) {
         const where = { submissionId: submission.id, findingKey };
         await this.waivers.findOrCreate({
@@ -83,7 +85,7 @@ export class Review {
       step: 'examine' as const,
       verb: 'pin-query',
       summary: () => `query pinned to ${place}`,
-      after: query,
+      after: () => query,
     };
     return this.changes.run(change, async (submission, transaction) => {
       requireReviewer(submission, editing.by);
@@ -95,16 +97,13 @@ export class Review {
   }
 
   /** Contributor and steward both answer; the other side is told by mail. */
-  reply(
-    editing: Editing & { step: 'edit' | 'examine' },
-    queryId: string,
-    text: string,
-  ): Promise<SubmissionRow> {
+  reply(editing: Editing, queryId: string, text: string): Promise<SubmissionRow> {
     const change = {
       ...editing,
+      step: 'answer' as const,
       verb: 'answer-query',
       summary: () => 'a query answered',
-      after: { queryId },
+      after: () => ({ queryId }),
     };
     return this.changes.run(change, async (submission, transaction) => {
       const query = await this.queries.findOne({
@@ -135,7 +134,7 @@ export class Review {
   }
 
   /** @throws Problem 403 for whoever contributed or corrected the submission */
-  async requireFourEyes(submission: SubmissionRow, by: Person, transaction: Transaction): Promise<void> {
+  async requireFourEyes(submission: SubmissionRow, by: Person, transaction?: Transaction): Promise<void> {
     if (!(await this.access.hasHandIn(submission, by, transaction))) return;
     throw problem(
       403,

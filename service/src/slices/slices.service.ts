@@ -29,9 +29,13 @@ export class SlicesService implements OnApplicationBootstrap {
     );
   }
 
-  async bySlug(slug: string): Promise<SliceVersion> {
+  async find(slug: string): Promise<SliceVersion | null> {
     const object = await this.versions.objectBySlug(SLICE, slug);
-    const version = object && (await this.versions.latestPublished<SliceContent>(object.id));
+    return object && this.versions.latestPublished<SliceContent>(object.id);
+  }
+
+  async bySlug(slug: string): Promise<SliceVersion> {
+    const version = await this.find(slug);
     if (!version) throw notFound('Slice', slug);
     return version;
   }

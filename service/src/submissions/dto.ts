@@ -14,7 +14,7 @@ import { createZodDto } from 'nestjs-zod';
 import { z } from 'zod';
 
 export class UploadDto extends createZodDto(
-  z.object({ kind: datasetKindId.default('dust-flux'), title: shortText.optional() }),
+  z.strictObject({ kind: datasetKindId.default('dust-flux'), title: shortText.optional() }),
 ) {}
 export class SubmissionsQueryDto extends createZodDto(submissionsQuery.extend(pageQuery.shape)) {}
 export class GridQueryDto extends createZodDto(gridQuery) {}

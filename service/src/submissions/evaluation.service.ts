@@ -9,7 +9,6 @@ import type { SubmissionMetadata, VettingContext } from '@siltlight/common/vetti
 import type { Finding } from '@siltlight/common/vetting/rule';
 import { vet } from '@siltlight/common/vetting/vet';
 import type { DatasetKindId } from '@siltlight/common/wire/submissions';
-import type { Transaction } from 'sequelize';
 import { sampleOf } from '../datasets/dataset-content';
 import { HeldSites } from '../datasets/held-sites.service';
 import { ParsedWorkbooks } from '../workers/parsed-workbooks.service';
@@ -28,7 +27,7 @@ export interface Draft {
   kind: DatasetKindId;
   mapping: Mapping;
   metadata: SubmissionMetadata;
-  corrections: Correction[];
+  corrections: (Correction & { id: string })[];
   leftOut: { sheet: string; row: number; reason: string }[];
   waivedKeys: ReadonlySet<string>;
   /** false: a file that is only checked, without a form */
@@ -56,16 +55,26 @@ export class Evaluations {
     const known = this.recent.get(key);
     if (known) return known;
     const evaluation = await this.evaluate(await this.draftOf(submission));
-    this.recent.set(key, evaluation);
-    const oldest = this.recent.keys().next().value;
-    if (this.recent.size > KEPT && oldest !== undefined) this.recent.delete(oldest);
+    this.keep(submission, evaluation);
     return evaluation;
   }
 
-  /** What would be evaluated, inside a write that has just changed something. */
-  async draftOf(submission: SubmissionRow, transaction?: Transaction): Promise<Draft> {
-    const scope = { where: { submissionId: submission.id }, ...(transaction ? { transaction } : {}) };
-    const inOrder = { ...scope, order: [['id', 'ASC']] as [string, string][] };
+  /** An evaluation that was made before its revision was written. */
+  keep({ id, revision }: SubmissionRow, evaluation: Evaluation): void {
+    this.recent.set(`${id} ${revision}`, evaluation);
+    const oldest = this.recent.keys().next().value;
+    if (this.recent.size > KEPT && oldest !== undefined) this.recent.delete(oldest);
+  }
+
+  /** A new revision with the same data: a hand-over, a query. */
+  carryOver(submission: SubmissionRow): void {
+    const before = this.recent.get(`${submission.id} ${submission.revision - 1}`);
+    if (before) this.keep(submission, before);
+  }
+
+  /** Everything that the findings of the present revision rest on. */
+  async draftOf(submission: SubmissionRow): Promise<Draft> {
+    const inOrder = { where: { submissionId: submission.id }, order: [['id', 'ASC']] as [string, string][] };
     const [corrections, leftOut, waivers] = await Promise.all([
       this.corrections.findAll({ ...inOrder, where: { submissionId: submission.id, undoneAt: null } }),
       this.leftOut.findAll(inOrder),
@@ -76,7 +85,7 @@ export class Evaluations {
       kind: submission.kind,
       mapping: submission.mapping,
       metadata: submission.metadata,
-      corrections: corrections.map(({ sheet, row, column, text }) => ({ sheet, row, column, text })),
+      corrections: corrections.map(({ id, sheet, row, column, text }) => ({ id, sheet, row, column, text })),
       leftOut: leftOut.map(({ sheet, row, reason }) => ({ sheet, row, reason })),
       waivedKeys: new Set(waivers.map(({ findingKey }) => findingKey)),
       formOffered: true,
@@ -85,7 +94,9 @@ export class Evaluations {
 
   async evaluate(draft: Draft): Promise<Evaluation> {
     const { workbook, kind, mapping, metadata, corrections } = draft;
-    const { rows, missingCodes } = normaliseWorkbook(workbook, datasetKind(kind), mapping, corrections);
+    const { rows, missingCodes } = normaliseWorkbook(workbook, datasetKind(kind), mapping, corrections, {
+      ageDatum: metadata.ageDatum,
+    });
     const reasons = new Map(draft.leftOut.map(({ sheet, row, reason }) => [`${sheet}\0${row}`, reason]));
     const marked = rows.map((row) => {
       const reason = reasons.get(`${row.sheet}\0${row.row}`);

@@ -4,10 +4,10 @@ import { problem } from '../http/problem';
 import { OutboxService } from '../notifications/outbox.service';
 import { PeopleService } from '../users/people.service';
 import { Evaluations } from './evaluation.service';
-import { type Editing, requireOwn } from './mending.service';
 import { missingMetadata } from './missing-metadata';
 import { numberText, type SubmissionRow } from './models/submission-row';
-import { SubmissionChanges } from './submission-changes.service';
+import { requireOwn } from './require-own';
+import { type Editing, SubmissionChanges } from './submission-changes.service';
 
 /** The contributor's hand-overs: to the stewards, and back out of the process. */
 @Injectable()

@@ -20,20 +20,20 @@ export class SubmissionAccess {
   async visible(id: string, reader: Person, transaction?: Transaction): Promise<SubmissionRow> {
     const row = await this.submissions.findByPk(id, transaction ? { transaction } : {});
     const own = row?.contributorId === reader.id;
-    const handedIn = row !== null && (row.submittedAt !== null || row.state === 'withdrawn');
+    const handedIn = (row?.submittedAt ?? null) !== null;
     if (!row || !(own || (handedIn && reader.roles.includes('steward')))) throw notFound('Submission', id);
     return row;
   }
 
   /**
-   * The submission as it is at the start of a write: visible, at the revision that the caller has seen, in a state
+   * The submission as it is before a change: visible, at the revision that the caller has seen, in a state
    * that allows the step.
    *
    * @throws Problem 404, 428, 412, 409
    */
   async forStep(
     { id, ifMatch, by, step }: { id: string; ifMatch: string | undefined; by: Person; step: Step },
-    transaction: Transaction,
+    transaction?: Transaction,
   ): Promise<SubmissionRow> {
     const row = await this.visible(id, by, transaction);
     const expected = expectedVersion(ifMatch, undefined);

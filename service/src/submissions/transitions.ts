@@ -3,13 +3,23 @@ import { problem } from '../http/problem';
 import { numberText, type SubmissionRow } from './models/submission-row';
 
 export type Step =
-  'edit' | 'submit' | 'withdraw' | 'claim' | 'release' | 'examine' | 'approve' | 'return' | 'decline';
+  | 'edit'
+  | 'submit'
+  | 'withdraw'
+  | 'answer'
+  | 'claim'
+  | 'release'
+  | 'examine'
+  | 'approve'
+  | 'return'
+  | 'decline';
 
 /** From which states a step may be taken, and where it leads (a step without a target stays). */
 export const STEPS: Record<Step, { from: readonly SubmissionState[]; to?: SubmissionState }> = {
   edit: { from: ['draft', 'returned'] },
   submit: { from: ['draft', 'returned'], to: 'submitted' },
   withdraw: { from: ['draft', 'submitted', 'returned'], to: 'withdrawn' },
+  answer: { from: ['submitted', 'in-review', 'returned'] },
   claim: { from: ['submitted'], to: 'in-review' },
   release: { from: ['in-review'], to: 'submitted' },
   examine: { from: ['submitted', 'in-review'] },

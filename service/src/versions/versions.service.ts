@@ -18,6 +18,7 @@ import {
 } from './version';
 
 export interface VersionFilter {
+  ids?: string[];
   states?: VersionState[];
   objectIds?: string[];
   ownerId?: string;
@@ -185,11 +186,13 @@ function inside(transaction: Transaction | undefined): { transaction?: Transacti
 }
 
 function selection(kind: string, filter: VersionFilter) {
-  const { states, objectIds, ownerId, slug, stale, after } = filter;
+  const { ids, states, objectIds, ownerId, slug, stale, after } = filter;
   const where: WhereOptions = {
     ...(states ? { state: states } : {}),
     ...(objectIds ? { objectId: objectIds } : {}),
-    ...(after ? { id: { [Op.gt]: after } } : {}),
+    ...(ids || after
+      ? { id: { ...(ids ? { [Op.in]: ids } : {}), ...(after ? { [Op.gt]: after } : {}) } }
+      : {}),
     ...(stale === undefined ? {} : { staleSince: stale ? { [Op.ne]: null } : null }),
   };
   const objectWhere = { kind, ...(ownerId ? { ownerId } : {}), ...(slug ? { slug } : {}) };

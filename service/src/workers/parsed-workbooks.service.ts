@@ -1,7 +1,8 @@
-import { gunzip, gzip } from 'node:zlib';
-import { promisify } from 'node:util';
+import { randomUUID } from 'node:crypto';
 import * as fs from 'node:fs/promises';
 import * as path from 'node:path';
+import { promisify } from 'node:util';
+import { gunzip, gzip } from 'node:zlib';
 import { Injectable } from '@nestjs/common';
 import type { RawWorkbook } from '@siltlight/common/sheet/grid';
 import { Settings } from '../config/settings';
@@ -11,8 +12,8 @@ import { readUpload } from './upload-reader';
 const KEPT = 4;
 
 /**
- * What the upload reader made of each stored file, kept beside it under the file's own checksum, so that preview,
- * vetting and trace all look at one parsed result. A lost one is made again from the file.
+ * What the upload reader made of each stored file, kept under the file's own checksum but apart from the store, whose
+ * sweep knows only files with a row. Preview, vetting and trace all look at one parsed result; a lost one is made again.
  */
 @Injectable()
 export class ParsedWorkbooks {
@@ -26,7 +27,7 @@ export class ParsedWorkbooks {
   async store(sha256: string, workbook: RawWorkbook): Promise<void> {
     const target = this.place(sha256);
     await fs.mkdir(path.dirname(target), { recursive: true });
-    const temporary = `${target}.${process.pid}.part`;
+    const temporary = `${target}.${randomUUID()}.part`;
     await fs.writeFile(temporary, await promisify(gzip)(JSON.stringify(workbook), { level: 4 }));
     await fs.rename(temporary, target);
     this.remember(sha256, workbook);
@@ -59,7 +60,7 @@ export class ParsedWorkbooks {
   }
 
   private place(sha256: string): string {
-    return path.join(this.settings.filesDir, 'parsed', `${sha256}.json.gz`);
+    return path.join(this.settings.dataDir, 'parsed', `${sha256}.json.gz`);
   }
 }
 

@@ -13,8 +13,19 @@ export interface GaussRule {
  * Checked against: checks/general/gaussian_grid_rows.csv.
  *
  * @param points n, a whole number of at least 1
+ * @returns the rule, made once for each n and shared: do not write into it
  */
 export function gaussLegendre(points: number): GaussRule {
+  const known = rules.get(points);
+  if (known) return known;
+  const rule = makeRule(points);
+  rules.set(points, rule);
+  return rule;
+}
+
+const rules = new Map<number, GaussRule>();
+
+function makeRule(points: number): GaussRule {
   const nodes = new Float64Array(points);
   const weights = new Float64Array(points);
   for (let i = 0; i < Math.ceil(points / 2); i += 1) {

@@ -1,7 +1,8 @@
 import * as fs from 'node:fs';
 import * as path from 'node:path';
-import type { SubmissionDetail } from '@siltlight/common/wire/submissions';
+import type { FindingView, SubmissionDetail } from '@siltlight/common/wire/submissions';
 import type { Test } from 'supertest';
+import { answers } from './form';
 import type { SignedInCaller } from './sign-in';
 
 export const SUBMISSIONS = '/api/v1/submissions';
@@ -72,4 +73,97 @@ export async function uploaded(
   fields: Record<string, string> = {},
 ): Promise<SubmissionDetail> {
   return (await upload(caller, content, fileName, fields).expect(201)).body as SubmissionDetail;
+}
+
+/** Acts on a submission one after the other, with the revision that the last answer gave. */
+export class Steps {
+  constructor(public detail: SubmissionDetail) {}
+
+  get path(): string {
+    return `${SUBMISSIONS}/${this.detail.id}`;
+  }
+
+  get tag(): string {
+    return `"${this.detail.revision}"`;
+  }
+
+  call(caller: SignedInCaller, act: string, body?: object): Test {
+    return caller.post(`${this.path}/${act}`, body).set('If-Match', this.tag);
+  }
+
+  async post(caller: SignedInCaller, act: string, body?: object): Promise<SubmissionDetail> {
+    return this.took(await this.call(caller, act, body).expect(200));
+  }
+
+  async put(caller: SignedInCaller, what: string, body: object): Promise<SubmissionDetail> {
+    const call = caller.put(`${this.path}/${what}`, body).set('If-Match', this.tag);
+    return this.took(await call.expect(200));
+  }
+
+  async reload(caller: SignedInCaller): Promise<SubmissionDetail> {
+    return this.took(await caller.get(this.path).expect(200));
+  }
+
+  async findings(caller: SignedInCaller, query = 'limit=1000'): Promise<FindingView[]> {
+    return (await caller.get(`${this.path}/findings?${query}`).expect(200)).body.items as FindingView[];
+  }
+
+  /** Waives every open warning, as a steward who has looked at each. */
+  async waiveAll(steward: SignedInCaller): Promise<void> {
+    const warnings = (await this.findings(steward, 'severity=warning&limit=1000')).filter(
+      ({ waived }) => !waived,
+    );
+    if (warnings.length === 0) return;
+    const findingKeys = warnings.map(({ key }) => key);
+    await this.post(steward, 'waivers', { findingKeys, reason: 'Looked at, one by one.' });
+  }
+
+  private took(answer: { body: unknown }): SubmissionDetail {
+    this.detail = answer.body as SubmissionDetail;
+    return this.detail;
+  }
+}
+
+/** Two samples that no rule objects to but for remarks: small, so that many can be made. */
+export const SMALL_TABLE =
+  'Site,Latitude,Longitude,Age,Age error,Dust flux,Flux error (1 sigma),Size cut-off\n' +
+  ',degrees N,degrees E,ka BP,ka,g m-2 yr-1,g m-2 yr-1,\n' +
+  'Core KX-1,-41.27,172.64,1.2,0.05,0.42,0.04,bulk\n' +
+  'Core KX-1,-41.27,172.64,20.4,0.2,1.31,0.12,bulk\n';
+
+/** Uploaded, with the form filled in. */
+export async function described(
+  caller: SignedInCaller,
+  content: Buffer | string = SMALL_TABLE,
+  fileName = 'small.csv',
+  form: object = answers,
+): Promise<Steps> {
+  const steps = new Steps(await uploaded(caller, content, fileName));
+  await steps.put(caller, 'metadata', form);
+  return steps;
+}
+
+export async function handedIn(
+  caller: SignedInCaller,
+  content: Buffer | string = SMALL_TABLE,
+  fileName = 'small.csv',
+  form: object = answers,
+): Promise<Steps> {
+  const steps = await described(caller, content, fileName, form);
+  await steps.post(caller, 'submit');
+  return steps;
+}
+
+export async function approved(
+  contributor: SignedInCaller,
+  steward: SignedInCaller,
+  content: Buffer | string = SMALL_TABLE,
+  fileName = 'small.csv',
+  decision: object = {},
+  form: object = answers,
+): Promise<Steps> {
+  const steps = await handedIn(contributor, content, fileName, form);
+  await steps.waiveAll(steward);
+  await steps.post(steward, 'decision', { decision: 'approve', ...decision });
+  return steps;
 }

@@ -42,7 +42,7 @@ test('the size-integrated optics of every mode of the table are met within the s
     // Closed forms: as good as the seven and six digits printed.
     expect(relativeError(optics.effectiveRadiusUm, numberIn(row, 'reff_um')), label).toBeLessThan(2e-6);
     expect(Math.abs(radiusMoment(mode, 0) - numberIn(row, 'number_fraction_inside_limits'))).toBeLessThan(
-      1e-6,
+      2e-6, // the last printed digit, of limits that are themselves rounded
     );
   }
 });

@@ -31,7 +31,7 @@ export default tseslint.config(
   },
   {
     files: ['common/src/**/*.ts'],
-    ignores: ['**/*.test.ts'],
+    ignores: ['**/*.test.ts', '**/*.test-support.ts'],
     rules: {
       // common is pure: no I/O, no clock, no randomness without a seed.
       'no-restricted-imports': ['error', { patterns: ['node:*', 'fs', 'path', '@siltlight/*'] }],
@@ -63,7 +63,7 @@ export default tseslint.config(
   },
   { files: ['**/*.{js,mjs,cjs}'], languageOptions: { globals: { ...globals.node, ...globals.browser } } },
   {
-    files: ['**/test/**', '**/*.spec.ts', '**/*.e2e-spec.ts', '**/*.test.{ts,tsx}'],
+    files: ['**/test/**', '**/*.test-support.ts', '**/*.spec.ts', '**/*.e2e-spec.ts', '**/*.test.{ts,tsx}'],
     rules: {
       '@typescript-eslint/no-unsafe-assignment': 'off',
       '@typescript-eslint/no-unsafe-member-access': 'off',

@@ -6,7 +6,7 @@ import { numberOf } from './place';
 export function opticalDepths(context: VettingContext): { row: SampleRow; opticalDepth: number }[] {
   if (context.kind !== 'point-optical-depth') return [];
   return context.rows.flatMap((row) => {
-    const opticalDepth = numberOf(row, 'opticalDepth');
+    const opticalDepth = numberOf(row, 'aod');
     return opticalDepth === null ? [] : [{ row, opticalDepth }];
   });
 }

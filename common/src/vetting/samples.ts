@@ -22,8 +22,8 @@ export function archiveOf(context: VettingContext, row: SampleRow): Archive | nu
 }
 
 /** The field that carries the value a dataset is about. */
-export const valueField = (context: VettingContext): 'fluxGM2Yr' | 'opticalDepth' =>
-  context.kind === 'point-optical-depth' ? 'opticalDepth' : 'fluxGM2Yr';
+export const valueField = (context: VettingContext): 'fluxGM2Yr' | 'aod' =>
+  context.kind === 'point-optical-depth' ? 'aod' : 'fluxGM2Yr';
 
 /** The row's value: flux [g m⁻² yr⁻¹] or optical depth [1]. */
 export const valueOf = (context: VettingContext, row: SampleRow): number | null =>

@@ -67,12 +67,12 @@ export const notRunRules: Rule[] = [
     notRun: FIELD,
   }),
   later('V67', 'depth-against-load', 'Optical depth and load do not fit', 'warning', 'field', {
-    needs: ['opticalDepth'],
+    needs: ['aod'],
     why: 'Optical depth over load is the mass extinction efficiency, 0.1 to 2.5 m2 g-1 for dust.',
     notRun: 'Runs when a field is built that holds both optical depth and load.',
   }),
   later('V68', 'depth-against-deposition', 'Optical depth and deposition do not fit', 'note', 'field', {
-    needs: ['opticalDepth', 'fluxGM2Yr'],
+    needs: ['aod', 'fluxGM2Yr'],
     why: 'Deposition times lifetime times extinction efficiency closes the chain within a factor of five.',
     notRun: 'Runs when a field is built that holds both optical depth and deposition.',
   }),

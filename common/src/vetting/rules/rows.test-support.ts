@@ -37,7 +37,7 @@ const EMPTY: SampleRow = {
 /** Fields in the order of their columns; a field beyond these takes the next letter. */
 const COLUMNS = [
   ...Object.keys(EMPTY).filter((key) => !['sheet', 'row', 'cells', 'quantity'].includes(key)),
-  ...['opticalDepth', 'opticalDepthSigma', 'wavelengthNm', 'angstromExponent', 'species'],
+  ...['aod', 'aodSigma', 'wavelengthNm', 'angstromExponent', 'aerosolSpecies'],
 ];
 
 const letterOf = (field: string): string => columnLetter(COLUMNS.indexOf(field));
@@ -185,7 +185,7 @@ export function opticalDepth(
   ...properties: { [field: string]: number | string | null | Record<string, Partial<TracedValue>> }[]
 ): VettingContext {
   const samples = properties.map(({ cells, ...given }, index) => {
-    const values = { opticalDepth: 0.3, wavelengthNm: 550, species: 'dust', ...given };
+    const values = { aod: 0.3, wavelengthNm: 550, aerosolSpecies: 'dust', ...given };
     const made = Object.entries(values).filter(([, value]) => value !== null);
     return row({
       row: index + 2,

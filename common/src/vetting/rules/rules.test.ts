@@ -1,4 +1,4 @@
-import { existsSync, readFileSync } from 'node:fs';
+import { existsSync, readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { expect, test } from 'vitest';
 import { rulesPage, stageCounts } from '../report';
@@ -11,12 +11,17 @@ test('V01 to V80 are registered once each, in order, with a slug of their own', 
   expect(new Set(rules.map((rule) => rule.slug)).size).toBe(80);
 });
 
-test('every rule that runs has its own file and shows both kinds of example in the test beside it', () => {
+test('every rule that runs has its own file, and examples of both kinds that one test file runs', () => {
+  const groups = readdirSync(__dirname)
+    .filter((name) => name.endsWith('.test.ts'))
+    .map((name) => readFileSync(join(__dirname, name), 'utf8'))
+    .join('');
   for (const { id, slug } of rules.filter((rule) => !rule.notRun)) {
-    const file = join(__dirname, `${id.toLowerCase()}-${slug}`);
-    expect(existsSync(`${file}.ts`), `${file}.ts`).toBe(true);
-    const examples = readFileSync(`${file}.test.ts`, 'utf8');
-    expect(examples, file).toMatch(/examplesOf\(\w+, \{[\s\S]*quiet: \{[\s\S]*fires: \{/);
+    const name = `${id.toLowerCase()}-${slug}`;
+    expect(existsSync(join(__dirname, `${name}.ts`)), `${name}.ts`).toBe(true);
+    const examples = readFileSync(join(__dirname, `${name}.examples.test-support.ts`), 'utf8');
+    expect(examples, name).toMatch(/examplesOf\(\w+, \{[\s\S]*quiet: \{[\s\S]*fires: \{/);
+    expect(groups.split(`'./${name}.examples.test-support'`), name).toHaveLength(2);
   }
 });
 

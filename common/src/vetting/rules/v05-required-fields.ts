@@ -49,7 +49,7 @@ export const requiredFields: Rule = {
 function* checkSheet(context: VettingContext, sheet: string, rows: SampleRow[]): Iterable<RuleHit> {
   const value: Wanted =
     context.kind === 'point-optical-depth'
-      ? { field: 'opticalDepth', title: 'optical depth', fields: ['opticalDepth'] }
+      ? { field: 'aod', title: 'optical depth', fields: ['aod'] }
       : { field: 'fluxGM2Yr', title: 'dust flux', fields: ['fluxGM2Yr'] };
   const wanted = [...PLACE_AND_TIME, ...(context.kind === 'point-optical-depth' ? [] : [AGE])];
   const absent = [...wanted, value].filter((one) => !isOffered(context, sheet, rows, one));

@@ -12,7 +12,7 @@ export const opticalDepthRange: Rule = {
   title: 'Optical depth impossible or unusual',
   severity: 'error',
   stage: 'file',
-  needs: ['opticalDepth'],
+  needs: ['aod'],
   source: 'limits of retrievals: common practice, no source',
   why: 'Beyond 5 no retrieval sees the ground; a strongly negative value is a code or a wrong column.',
   limits: LIMITS,
@@ -20,14 +20,14 @@ export const opticalDepthRange: Rule = {
   *check(context) {
     const { noiseMin, unusual, max } = limitsOf(context, 'V61', LIMITS);
     for (const row of context.kind === 'point-optical-depth' ? context.rows : []) {
-      const refused = refusedHit(context, row, 'opticalDepth', 'optical depth');
+      const refused = refusedHit(context, row, 'aod', 'optical depth');
       if (refused) yield refused;
     }
     for (const { row, opticalDepth } of opticalDepths(context)) {
       if (opticalDepth >= noiseMin && opticalDepth <= unusual) continue;
       const impossible = opticalDepth < noiseMin || opticalDepth > max;
       yield {
-        ...placeOf(context, row, 'opticalDepth'),
+        ...placeOf(context, row, 'aod'),
         severity: impossible ? 'error' : 'warning',
         message: `The optical depth is ${shown(opticalDepth)}; ${impossible ? `it must lie within ${noiseMin} to ${max}` : `more than ${unusual} is unusual for a mean`}.`,
         remedy: impossible

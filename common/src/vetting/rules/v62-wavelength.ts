@@ -12,7 +12,7 @@ export const wavelength: Rule = {
   title: 'Wavelength missing or out of range',
   severity: 'error',
   stage: 'file',
-  needs: ['opticalDepth', 'wavelengthNm'],
+  needs: ['aod', 'wavelengthNm'],
   source: 'range of the instruments, from memory',
   why: 'Optical depth falls with wavelength by up to four times over the visible; without it no depth at 550 nm can be had.',
   limits: LIMITS,

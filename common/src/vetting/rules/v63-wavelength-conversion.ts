@@ -17,7 +17,7 @@ export const wavelengthConversion: Rule = {
   title: 'No Ångström exponent to reach 550 nm',
   severity: 'warning',
   stage: 'file',
-  needs: ['opticalDepth', 'wavelengthNm', 'angstromExponent'],
+  needs: ['aod', 'wavelengthNm', 'angstromExponent'],
   source: 'Ångström 1929, Geografiska Annaler 11, 156-166; range of the default: common practice, no source',
   why: 'From 870 nm the depth at 550 nm differs twofold between dust and smoke.',
   limits: LIMITS,

@@ -22,7 +22,7 @@ export const angstromExponent: Rule = {
     for (const { row } of opticalDepths(context)) {
       const exponent = numberOf(row, 'angstromExponent');
       if (exponent === null) continue;
-      const isDust = /dust|staub|poussi|polvo/i.test(textOf(row, 'species') ?? '');
+      const isDust = /dust|staub|poussi|polvo/i.test(textOf(row, 'aerosolSpecies') ?? '');
       const top = isDust ? dustMax : max;
       if (exponent >= min && exponent <= top) continue;
       yield {

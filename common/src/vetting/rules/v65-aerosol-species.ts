@@ -13,7 +13,7 @@ export const aerosolSpecies: Rule = {
   title: 'Aerosol species not stated, or dust above total',
   severity: 'error',
   stage: 'submission',
-  needs: ['opticalDepth', 'species'],
+  needs: ['aod', 'aerosolSpecies'],
   source: 'dust is about 23 % of the total optical depth (Gkikas et al. 2022)',
   why: 'A total optical depth taken as dust is about four times too much.',
 
@@ -21,9 +21,9 @@ export const aerosolSpecies: Rule = {
     const rows = opticalDepths(context).map(({ row }) => row);
     const inText = /dust|total|coarse|stratospher|species/i.test(statements(context));
     for (const [sheet, ofSheet] of bySheet(rows)) {
-      if (inText || ofSheet.every((row) => textOf(row, 'species') !== null)) continue;
+      if (inText || ofSheet.every((row) => textOf(row, 'aerosolSpecies') !== null)) continue;
       yield {
-        ...sheetPlace(sheet, 'species'),
+        ...sheetPlace(sheet, 'aerosolSpecies'),
         ...asked(
           context,
           `The species of the optical depths on sheet "${sheet}"`,
@@ -40,14 +40,14 @@ function* dustAboveTotal(context: VettingContext, rows: SampleRow[]): Iterable<R
     [siteKey(row.site ?? ''), textOf(row, 'date') ?? '', numberOf(row, 'wavelengthNm')].join('\u0000'),
   );
   for (const moment of moments.values()) {
-    const total = moment.find((row) => /total/i.test(textOf(row, 'species') ?? ''));
+    const total = moment.find((row) => /total/i.test(textOf(row, 'aerosolSpecies') ?? ''));
     if (!total) continue;
-    const limit = numberOf(total, 'opticalDepth')!;
+    const limit = numberOf(total, 'aod')!;
     for (const row of moment) {
-      const value = numberOf(row, 'opticalDepth')!;
-      if (!/dust/i.test(textOf(row, 'species') ?? '') || value <= limit) continue;
+      const value = numberOf(row, 'aod')!;
+      if (!/dust/i.test(textOf(row, 'aerosolSpecies') ?? '') || value <= limit) continue;
       yield {
-        ...placeOf(context, row, 'opticalDepth'),
+        ...placeOf(context, row, 'aod'),
         message: `The dust optical depth is ${shown(value)}, above the total of ${shown(limit)} in row ${total.row}.`,
         remedy: 'Check whether the two are exchanged and type the right values, or leave the row out.',
         remedyKind: 'mend',

@@ -10,18 +10,18 @@ export const humidityState: Rule = {
   title: 'Ambient or dry not stated',
   severity: 'warning',
   stage: 'submission',
-  needs: ['opticalDepth', 'species', 'method'],
+  needs: ['aod', 'aerosolSpecies', 'method'],
   source: 'CF Conventions standard names: ambient and dry aerosol have different names',
   why: 'Salt and sulfate swell with humidity: the ambient depth is up to several times the dry one.',
 
   *check(context) {
     const swelling = opticalDepths(context).find(({ row }) =>
-      /sul[fp]|salt|salz|organic|nitrat/i.test(textOf(row, 'species') ?? ''),
+      /sul[fp]|salt|salz|organic|nitrat/i.test(textOf(row, 'aerosolSpecies') ?? ''),
     );
     if (!swelling || /ambient|\bdry\b|trocken|humid/i.test(statements(context))) return;
     yield {
       ...filePlace('method'),
-      message: `Optical depths of "${textOf(swelling.row, 'species')}" (first in row ${swelling.row.row}) are not said to be ambient or dry.`,
+      message: `Optical depths of "${textOf(swelling.row, 'aerosolSpecies')}" (first in row ${swelling.row.row}) are not said to be ambient or dry.`,
       remedy: 'Say "ambient" or "dry" in the method.',
       remedyKind: 'answer',
     };

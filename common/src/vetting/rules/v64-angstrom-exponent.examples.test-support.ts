@@ -6,7 +6,7 @@ examplesOf(angstromExponent, {
   quiet: {
     'dust has 0.2 and haze 1.6': opticalDepth(
       { angstromExponent: 0.2 },
-      { angstromExponent: 1.6, species: 'total' },
+      { angstromExponent: 1.6, aerosolSpecies: 'total' },
     ),
   },
   fires: {
@@ -15,7 +15,7 @@ examplesOf(angstromExponent, {
       first: { severity: 'warning', row: 2 },
     },
     'haze has 4': {
-      context: opticalDepth({ angstromExponent: 4, species: 'total' }),
+      context: opticalDepth({ angstromExponent: 4, aerosolSpecies: 'total' }),
       first: { field: 'angstromExponent', remedyKind: 'waive' },
     },
   },

@@ -2,7 +2,7 @@ import { examplesOf } from './examples.test-support';
 import { opticalDepth } from './rows.test-support';
 import { humidityState } from './v66-humidity-state';
 
-const sulfate = opticalDepth({ species: 'sulfate' });
+const sulfate = opticalDepth({ aerosolSpecies: 'sulfate' });
 
 examplesOf(humidityState, {
   quiet: {

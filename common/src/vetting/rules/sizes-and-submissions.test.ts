@@ -1,0 +1,19 @@
+// Examples of the rules on sizes, uncertainty, optical depth and the submission, one file a rule: run together so that the rules are loaded once.
+import './v51-size-cutoff.examples.test-support';
+import './v52-fine-below-bulk.examples.test-support';
+import './v53-size-method.examples.test-support';
+import './v54-uncertainty.examples.test-support';
+import './v55-relative-uncertainty.examples.test-support';
+import './v57-repeated-sample.examples.test-support';
+import './v58-neighbours.examples.test-support';
+import './v59-few-neighbours.examples.test-support';
+import './v61-optical-depth-range.examples.test-support';
+import './v62-wavelength.examples.test-support';
+import './v63-wavelength-conversion.examples.test-support';
+import './v64-angstrom-exponent.examples.test-support';
+import './v65-aerosol-species.examples.test-support';
+import './v66-humidity-state.examples.test-support';
+import './v77-reference.examples.test-support';
+import './v78-orcid.examples.test-support';
+import './v79-licence.examples.test-support';
+import './v80-differences.examples.test-support';

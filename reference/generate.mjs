@@ -7,6 +7,7 @@ import path from 'node:path';
 import { fileURLToPath } from 'node:url';
 import prettier from 'prettier';
 import * as make from './make-tables.mjs';
+import { refractiveIndices } from './refractive-indices.mjs';
 
 const here = import.meta.dirname;
 const tables = path.join(here, '..', 'common', 'src', 'tables');
@@ -35,6 +36,11 @@ const TABLES = [
     'dust-optical-depth',
     make.dustOpticalDepth,
     'optics/dust_optical_depth.csv. Gkikas et al. (2022), Atmos. Chem. Phys. 22, 3553.',
+  ],
+  [
+    'refractive-indices',
+    refractiveIndices,
+    'optics/refractive-index/*, read by refractive-indices.mjs. Source and licence of each table are in the table.',
   ],
   [
     'conventional-slices',

@@ -20,6 +20,7 @@ import { ErrorState } from '../shared/feedback/error-state';
 import { LoadingFigure } from '../shared/feedback/loading';
 import { useSettled } from '../shared/form/use-settled';
 import { Page } from '../shared/page/page';
+import { sliceWithArticle, sliceWithin } from '../shared/page/slice-name';
 
 export const loader =
   (client: QueryClient) =>
@@ -59,9 +60,9 @@ export default function NewField() {
   ];
   return (
     <Page
-      title={`New field of the ${slice.content.name}`}
+      title={`New field of ${sliceWithArticle(slice.content.name)}`}
       crumbs={crumbs}
-      sub={slice.reference ? `against ${slice.reference.name}` : undefined}
+      sub={slice.reference ? `against ${sliceWithin(slice.reference.name)}` : undefined}
       actions={
         <Button
           appearance="primary"

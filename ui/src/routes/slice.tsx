@@ -13,6 +13,7 @@ import { orbitalAgeText, timesInWords, windowText } from '../features/slices/sli
 import '../features/slices/slices.css';
 import { useHasRole } from '../shared/api/session';
 import { Page } from '../shared/page/page';
+import { sliceWithin } from '../shared/page/slice-name';
 import { StateTag } from '../shared/page/state-tag';
 
 export const loader =
@@ -32,7 +33,7 @@ export default function Slice() {
       title={content.name}
       crumbs={[{ label: 'Slices', to: '/slices' }, { label: content.name }]}
       state={<StateTag state={slice.state} />}
-      sub={reference ? `${times}, against ${reference.name}` : `${times}, a reference for other slices`}
+      sub={reference ? `${times}, against ${sliceWithin(reference.name)}` : `${times}, a reference for other slices`}
       actions={
         mayBuild && (
           <Button

@@ -8,7 +8,7 @@ import { faultOf, intoAddress, requestOf, setUpOf, startingSetUp, type SetUp } f
 const field = {
   title: 'LGM by regional scaling',
   sliceName: 'Last Glacial Maximum',
-  referenceName: 'pre-industrial',
+  referenceName: 'Pre-industrial',
   sizeCutoff: '< 20 µm',
   diagnostics: { usedSites: 14, regionsWithSites: 8 },
 } as FieldDetail;
@@ -21,7 +21,7 @@ const backdrop = { title: 'Zonal table', number: 3 } as BackdropView;
 
 test('each fold is told in one sentence that names what was chosen', () => {
   expect(plainText(airSentence(field))).toBe(
-    'Dust of Last Glacial Maximum from LGM by regional scaling (regional scaling, 14 sites in 8 regions), against pre-industrial; size fraction < 20 µm.',
+    'Dust of the Last Glacial Maximum from LGM by regional scaling (regional scaling, 14 sites in 8 regions), against pre-industrial; size fraction < 20 µm.',
   );
   expect(plainText(opticsSentence(optics, startingSetUp))).toBe(
     'Optical set Mineral dust, mean of 19 soils, version 2; single-scattering albedo 0.960 (0.940 to 0.980); longwave on, +8.00 W/m² per unit optical depth.',

@@ -2,6 +2,7 @@ import type { BackdropView, OpticalSetView } from '@siltlight/common/wire/estima
 import type { FieldDetail } from '@siltlight/common/wire/slices';
 import { Fragment } from 'react';
 import { counted, formatNumber } from '../../shared/number/format';
+import { sliceWithArticle, sliceWithin } from '../../shared/page/slice-name';
 import { methodPhrases } from './method-words';
 import type { SetUp } from './set-up';
 
@@ -25,9 +26,9 @@ export function airSentence(field: FieldDetail | undefined): Sentence {
   if (!field) return ['Pick the field whose air is to be computed.'];
   const { usedSites, regionsWithSites } = field.diagnostics;
   return [
-    `Dust of ${field.sliceName} from `,
+    `Dust of ${sliceWithArticle(field.sliceName)} from `,
     chosen(field.title),
-    ` (regional scaling, ${counted(usedSites, 'site')} in ${counted(regionsWithSites, 'region')}), against ${field.referenceName}; size fraction `,
+    ` (regional scaling, ${counted(usedSites, 'site')} in ${counted(regionsWithSites, 'region')}), against ${sliceWithin(field.referenceName)}; size fraction `,
     chosen(field.sizeCutoff ?? 'not stated'),
     '.',
   ];

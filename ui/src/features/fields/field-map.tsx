@@ -7,6 +7,7 @@ import { Figure } from '../../shared/figure/figure';
 import { ForcingMap, mapPicture } from '../../shared/map/forcing-map';
 import type { MapData } from '../../shared/map/map-data';
 import { regionsQuery } from '../../shared/map/regions-query';
+import { sliceWithin } from '../../shared/page/slice-name';
 import { usedSites } from './field-words';
 
 type Props = {
@@ -50,7 +51,7 @@ export function FieldMap({ field, selected, hovered, onSelect, onHover }: Props)
     [regions.data, field, selected, hovered],
   );
   return (
-    <Figure title="Dust ratio by region" sub={`${field.sliceName} over ${field.referenceName}`} picture={mapPicture(data)}>
+    <Figure title="Dust ratio by region" sub={`${field.sliceName} over ${sliceWithin(field.referenceName)}`} picture={mapPicture(data)}>
       {regions.isError && <ErrorState error={regions.error} retry={() => void regions.refetch()} />}
       {regions.data ? (
         <ForcingMap

@@ -4,6 +4,7 @@ import { useSearchParams } from 'react-router-dom';
 import { ExplainedCautions } from '../../shared/feedback/explained-cautions';
 import { Amount } from '../../shared/number/amount';
 import { formatNumber } from '../../shared/number/format';
+import { sliceWithArticle } from '../../shared/page/slice-name';
 import { FieldMap } from './field-map';
 import { FieldRegionTable, UnusedSites, UsedSites } from './field-tables';
 import { filledInWords, spreadInWords } from './field-words';
@@ -46,8 +47,9 @@ function FieldHeadline({ field }: { field: FieldDetail }) {
     <div className="field-headline">
       <div>
         <p className="field-say">
-          The {field.sliceName} had <Amount of={diagnostics.globalRatio} signed={false} fallback={1} /> times the dust
-          deposition of {field.referenceName}, over the sites used.
+          Over the sites used, dust deposition in {sliceWithArticle(field.sliceName)} was{' '}
+          <Amount of={diagnostics.globalRatio} signed={false} fallback={1} /> times that of{' '}
+          {sliceWithArticle(field.referenceName)}.
         </p>
         <ExplainedCautions of={field.cautions} first={3} />
       </div>

@@ -5,6 +5,7 @@ import { useWidth } from '../../shared/figure/use-width';
 import { sharedLimit } from '../../shared/map/forcing-map';
 import { formatForcing, formatNumber } from '../../shared/number/format';
 import { ForcingUnit } from '../../shared/number/unit';
+import { sliceWithin } from '../../shared/page/slice-name';
 import type { DataColumn } from '../../shared/table/column';
 import { useColourMode } from '../../shared/theme/colour-mode';
 import { forcingColour, gradient, ramps } from '../../shared/theme/ramps';
@@ -40,7 +41,7 @@ export function InsolationFigure({ slice, reference }: { slice: SliceContent; re
   const summary = `Insolation of ${slice.name} minus ${reference.name}: largest at ${latitudeText(Math.round(most.latitudeDeg))} in ${MONTH_NAMES[most.month]}, ${formatNumber(most.anomalyWm2, { decimals: 1, signed: true })} watts per square metre.`;
   return (
     <Figure
-      title={`Insolation against ${reference.name}`}
+      title={`Insolation against ${sliceWithin(reference.name)}`}
       sub={
         <>
           daily mean, <ForcingUnit />

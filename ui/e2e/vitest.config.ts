@@ -5,6 +5,7 @@ export default defineConfig({
   test: {
     include: ['e2e/**/*.walk.ts'],
     environment: 'node',
+    globalSetup: ['e2e/seed.ts'],
     fileParallelism: false,
     testTimeout: 180_000,
     hookTimeout: 180_000,

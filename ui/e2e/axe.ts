@@ -1,0 +1,31 @@
+import { AxeBuilder } from '@axe-core/playwright';
+import type { Page } from 'playwright-core';
+
+/** Fluent's tab sentinels: empty elements that only catch the focus and pass it on. */
+const sentinel = 'i[data-tabster-dummy][aria-hidden="true"]';
+
+/** Serious and critical faults of access, each as one readable line; empty when there is none. */
+export async function axeFaults(page: Page): Promise<string[]> {
+  const { violations } = await new AxeBuilder({ page })
+    .withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'])
+    .analyze();
+  const faults: string[] = [];
+  for (const { id, impact, nodes } of violations) {
+    if (impact !== 'serious' && impact !== 'critical') continue;
+    for (const { target, html, failureSummary } of nodes) {
+      const selector = String(target.at(-1));
+      if (id === 'aria-hidden-focus' && (await isSentinel(page, selector))) continue;
+      faults.push(`${id} at ${selector}: ${html.slice(0, 160)} ${(failureSummary ?? '').replace(/\s+/g, ' ')}`);
+    }
+  }
+  return faults;
+}
+
+const isSentinel = (page: Page, selector: string): Promise<boolean> =>
+  page.evaluate(
+    ([at, wanted]) => {
+      const element = document.querySelector(at!);
+      return element !== null && element.matches(wanted!) && element.textContent === '';
+    },
+    [selector, sentinel],
+  );

@@ -6,14 +6,15 @@ import type { Mapping } from '@siltlight/common/sheet/mapping';
 import { hostileFiles, strangeFiles } from './hostile-files';
 import { signedInAs, type SignedInCaller } from './support/sign-in';
 import { expectedRows, expectRows, REAL_EXPORT, REAL_WORKBOOK, sampleFile } from './support/submitting';
-import { testApp, type TestApp } from './support/test-app';
+import { testAppWithPeople } from './support/demo-people';
+import type { TestApp } from './support/test-app';
 
 const PATH = '/api/v1/calculators/check-file';
 
 let service: TestApp;
 let modeller: SignedInCaller;
 beforeAll(async () => {
-  service = await testApp({ seeded: true });
+  service = await testAppWithPeople();
   modeller = await signedInAs(service, 'modeller');
 });
 afterAll(() => service.close());

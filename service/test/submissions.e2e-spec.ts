@@ -17,14 +17,15 @@ import {
   upload,
   uploaded,
 } from './support/submitting';
-import { testApp, type TestApp } from './support/test-app';
+import { testAppWithPeople } from './support/demo-people';
+import type { TestApp } from './support/test-app';
 
 let service: TestApp;
 let scientist: SignedInCaller;
 let scientist2: SignedInCaller;
 let steward: SignedInCaller;
 beforeAll(async () => {
-  service = await testApp({ seeded: true });
+  service = await testAppWithPeople();
   scientist = await signedInAs(service, 'scientist');
   scientist2 = await signedInAs(service, 'scientist2');
   steward = await signedInAs(service, 'steward');
@@ -103,6 +104,15 @@ test('a second upload of the same bytes is told, also when both come at once', a
   expect(second!.sameFileAs ?? (await again(second!.id))).toEqual({ id: first!.id, number: first!.number });
 });
 const again = async (id: string) => (await scientist.get(`${SUBMISSIONS}/${id}`).expect(200)).body.sameFileAs;
+
+test('the same bytes under another name are read on their own: the sheet is called after the file', async () => {
+  const first = await described(scientist, undefined, 'one.csv');
+  // More uploads than parsed files and evaluations are kept in memory.
+  for (let count = 0; count < 8; count += 1) await described(scientist, undefined, `other-${count}.csv`);
+  const grid = await scientist.get(`${first.path}/grid?sheet=one&fromRow=3&limit=1`).expect(200);
+  expect(grid.body.rows[0].cells.F).toMatchObject({ text: '0.42', value: 0.42 });
+  await scientist.get(`${first.path}/grid?sheet=other-7`).expect(404);
+});
 
 test('a refused upload leaves no submission, no ledger row and no file', async () => {
   const before = await ledger().count({});

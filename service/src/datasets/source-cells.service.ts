@@ -20,7 +20,7 @@ export class SourceCells {
     row: number,
   ): Promise<z.infer<typeof sourceCells>> {
     const { file } = version.content;
-    const workbook = await this.workbooks.load(file.sha256);
+    const workbook = await this.workbooks.load(file);
     const sheet = workbook.sheets.find(({ name }) => name === sheetName);
     if (!sheet) throw notFound('Sheet', sheetName);
     const first = Math.max(1, row - ROWS_ABOVE);

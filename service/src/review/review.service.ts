@@ -88,6 +88,7 @@ export class Review {
       after: () => query,
     };
     return this.changes.run(change, async (submission, transaction) => {
+      await this.requireFourEyes(submission, editing.by, transaction);
       requireReviewer(submission, editing.by);
       await this.queries.create(
         { ...query, submissionId: submission.id, personId: editing.by.id },

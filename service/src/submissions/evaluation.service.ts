@@ -81,7 +81,7 @@ export class Evaluations {
       this.waivers.findAll(inOrder),
     ]);
     return {
-      workbook: await this.workbooks.load(submission.fileSha256),
+      workbook: await this.workbooks.load({ sha256: submission.fileSha256, fileName: submission.fileName }),
       kind: submission.kind,
       mapping: submission.mapping,
       metadata: submission.metadata,

@@ -50,7 +50,7 @@ export class Uploads {
       fileName: file.fileName,
       mediaType: MEDIA_TYPE,
     });
-    await this.workbooks.store(sha256, workbook);
+    await this.workbooks.store({ sha256, fileName: file.fileName }, workbook);
     const { kind, invented = false } = given;
     const mapping = await this.remembered.applyTo(proposeWorkbook(workbook, datasetKind(kind)), by.id);
     const title = given.title ?? file.fileName.replace(/\.[^.]+$/, '').replaceAll('_', ' ');

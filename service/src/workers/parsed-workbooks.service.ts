@@ -1,4 +1,4 @@
-import { randomUUID } from 'node:crypto';
+import { createHash, randomUUID } from 'node:crypto';
 import * as fs from 'node:fs/promises';
 import * as path from 'node:path';
 import { promisify } from 'node:util';
@@ -11,9 +11,16 @@ import { readUpload } from './upload-reader';
 
 const KEPT = 4;
 
+/** The same bytes under another name are another workbook: a text table's sheet is called after its file. */
+export interface NamedFile {
+  sha256: string;
+  fileName: string;
+}
+
 /**
- * What the upload reader made of each stored file, kept under the file's own checksum but apart from the store, whose
- * sweep knows only files with a row. Preview, vetting and trace all look at one parsed result; a lost one is made again.
+ * What the upload reader made of each stored file, kept under the checksums of its bytes and its name, apart from the
+ * store, whose sweep knows only files with a row. Preview, vetting and trace all look at one parsed result; a lost one
+ * is made again.
  */
 @Injectable()
 export class ParsedWorkbooks {
@@ -24,43 +31,45 @@ export class ParsedWorkbooks {
     private readonly files: FileStore,
   ) {}
 
-  async store(sha256: string, workbook: RawWorkbook): Promise<void> {
-    const target = this.place(sha256);
+  async store(file: NamedFile, workbook: RawWorkbook): Promise<void> {
+    const target = this.place(file);
     await fs.mkdir(path.dirname(target), { recursive: true });
     const temporary = `${target}.${randomUUID()}.part`;
     await fs.writeFile(temporary, await promisify(gzip)(JSON.stringify(workbook), { level: 4 }));
     await fs.rename(temporary, target);
-    this.remember(sha256, workbook);
+    this.remember(target, workbook);
   }
 
-  async load(sha256: string): Promise<RawWorkbook> {
-    const known = this.recent.get(sha256);
+  async load(file: NamedFile): Promise<RawWorkbook> {
+    const place = this.place(file);
+    const known = this.recent.get(place);
     if (known) return known;
-    const packed = await fs.readFile(this.place(sha256)).catch((error: NodeJS.ErrnoException) => {
+    const packed = await fs.readFile(place).catch((error: NodeJS.ErrnoException) => {
       if (error.code === 'ENOENT') return null;
       throw error;
     });
-    const workbook = packed ? await unpacked(packed) : await this.readAgain(sha256);
-    this.remember(sha256, workbook);
+    if (!packed) return this.readAgain(file);
+    const workbook = await unpacked(packed);
+    this.remember(place, workbook);
     return workbook;
   }
 
-  private async readAgain(sha256: string): Promise<RawWorkbook> {
-    const { fileName } = await this.files.describe(sha256);
-    const workbook = await readUpload({ path: this.files.path(sha256), fileName });
-    await this.store(sha256, workbook);
+  private async readAgain(file: NamedFile): Promise<RawWorkbook> {
+    const workbook = await readUpload({ path: this.files.path(file.sha256), fileName: file.fileName });
+    await this.store(file, workbook);
     return workbook;
   }
 
-  private remember(sha256: string, workbook: RawWorkbook): void {
-    this.recent.delete(sha256);
-    this.recent.set(sha256, workbook);
+  private remember(place: string, workbook: RawWorkbook): void {
+    this.recent.delete(place);
+    this.recent.set(place, workbook);
     const oldest = this.recent.keys().next().value;
     if (this.recent.size > KEPT && oldest !== undefined) this.recent.delete(oldest);
   }
 
-  private place(sha256: string): string {
-    return path.join(this.settings.dataDir, 'parsed', `${sha256}.json.gz`);
+  private place({ sha256, fileName }: NamedFile): string {
+    const name = createHash('sha256').update(fileName, 'utf8').digest('hex').slice(0, 16);
+    return path.join(this.settings.dataDir, 'parsed', `${sha256}-${name}.json.gz`);
   }
 }
 

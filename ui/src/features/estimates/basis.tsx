@@ -1,4 +1,3 @@
-import { FORCING_METHODS } from '@siltlight/common/forcing/methods';
 import type { EstimateDetail } from '@siltlight/common/wire/estimates';
 import { lazy, Suspense } from 'react';
 import { Link } from 'react-router-dom';
@@ -6,6 +5,7 @@ import { LoadingRows } from '../../shared/feedback/loading';
 import { Figure } from '../../shared/figure/figure';
 import { formatNumber } from '../../shared/number/format';
 import { formatDateTime } from '../../shared/number/time';
+import { methodFormulas } from './method-formulas';
 import { methodName } from './method-words';
 
 const Tex = lazy(() => import('./tex'));
@@ -13,7 +13,7 @@ const Tex = lazy(() => import('./tex'));
 /** How the number came about: pinned inputs, formula, seed, checksum. */
 export function Basis({ estimate }: { estimate: EstimateDetail }) {
   const { request } = estimate;
-  const method = FORCING_METHODS[request.method];
+  const method = methodFormulas[request.method];
   return (
     <Figure plain title="How it was computed" sub={methodName(request.method)}>
       <div className="fold-formula" tabIndex={0} role="region" aria-label={`Formula of ${method.title}`}>

@@ -1,10 +1,10 @@
 import { Field, Input, Radio, RadioGroup } from '@fluentui/react-components';
-import { FORCING_METHODS } from '@siltlight/common/forcing/methods';
 import type { EstimateMethodId } from '@siltlight/common/wire/estimates';
 import { lazy, Suspense } from 'react';
 import { LoadingRows } from '../../shared/feedback/loading';
 import { FormField } from '../../shared/form/form-field';
 import { Unit } from '../../shared/number/unit';
+import { methodFormulas } from './method-formulas';
 import { methodPhrases } from './method-words';
 import { NumberField } from './number-field';
 import type { FoldProps } from './set-up-folds';
@@ -14,7 +14,7 @@ const ids = Object.keys(methodPhrases) as EstimateMethodId[];
 
 /** Method with its formula and source, size of the ensemble, seed and title. */
 export function MethodFold({ setUp, problem, onChange }: FoldProps) {
-  const method = FORCING_METHODS[setUp.method];
+  const method = methodFormulas[setUp.method];
   return (
     <>
       <Field label="Method">

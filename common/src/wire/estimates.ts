@@ -125,6 +125,8 @@ export const estimateResult = z.object({
     .nullable(),
   criticalSingleScatteringAlbedo: z.number().nullable(),
   regions: z.array(estimateRegionResult),
+  /** places in no region: with them the regions add up to the globe */
+  outside: z.object({ areaShare: z.number(), forcing: forcingTriple }),
   varied: z.array(
     z.object({
       name: z.string(),

@@ -8,6 +8,7 @@ import { ReviewModule } from '../review/review.module';
 import { SubmissionsModule } from '../submissions/submissions.module';
 import { PeopleModule } from '../users/people.module';
 import { DemoEstimates } from './demo-estimates';
+import { DemoIntake } from './demo-intake';
 import { DemoScenario } from './demo-scenario.seed';
 
 /** The invented scenario; its steps run only in demo mode, after everything else is there. */
@@ -22,6 +23,6 @@ import { DemoScenario } from './demo-scenario.seed';
     ReviewModule,
     SubmissionsModule,
   ],
-  providers: [DemoEstimates, DemoScenario],
+  providers: [DemoEstimates, DemoIntake, DemoScenario],
 })
 export class DemoModule {}

@@ -10,14 +10,18 @@ import { publishedMarks } from './published-marks';
 export class EstimateContext {
   constructor(private readonly slices: SlicesService) {}
 
-  async of(sliceVersionId: string, referenceVersionId: string): Promise<EstimateDetail['context']> {
+  async of(
+    sliceVersionId: string,
+    referenceVersionId: string,
+    longwave: boolean,
+  ): Promise<EstimateDetail['context']> {
     const [slice, reference] = await Promise.all([
       this.slices.get(sliceVersionId),
       this.slices.get(referenceVersionId),
     ]);
     return {
       greenhouse: greenhouse(slice.content, reference.content),
-      published: publishedMarks(slice.content, reference.content),
+      published: publishedMarks({ slice: slice.content, reference: reference.content, longwave }),
     };
   }
 }

@@ -114,7 +114,11 @@ export class EstimateViews {
       opticalSetTitle: `${opticalSet.title}, version ${opticalSet.number}`,
       backdropTitle: `${backdrop.title}, version ${backdrop.number}`,
       result: version?.content.result ?? null,
-      context: await this.context.of(field.content.slice.versionId, field.content.reference.versionId),
+      context: await this.context.of(
+        field.content.slice.versionId,
+        field.content.reference.versionId,
+        run.request.longwave.on,
+      ),
       rights: rightsOf(loaded, reader),
     };
   }

@@ -1,5 +1,6 @@
 import { Injectable, type OnModuleInit } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
+import { prepareEstimate } from '@siltlight/common/estimate/prepared-estimate';
 import { previewEstimate } from '@siltlight/common/estimate/run-estimate';
 import type { EstimateRequest, EstimateResult } from '@siltlight/common/wire/estimates';
 import type { Transaction } from 'sequelize';
@@ -50,7 +51,8 @@ export class EstimatesService implements OnModuleInit {
     request: EstimateRequest,
     by: Person,
   ): Promise<{ id: string; jobId: string; jobPath: string }> {
-    const { title, pins } = await this.inputs.resolve(request);
+    const { title, pins, inputs } = await this.inputs.resolve(request);
+    prepareEstimate(inputs); // refuses now, by name, what the job would refuse later
     const id = newId();
     const job = await this.writes.run(async (transaction) => {
       const run = await this.createRun({ id, title, sliceSlug: pins.slice.slug, request, by }, transaction);
@@ -127,6 +129,7 @@ export class EstimatesService implements OnModuleInit {
       const given = { kind: ESTIMATE, title, ownerId: run.createdBy, content, slug: `run-${run.runNumber}` };
       const { version } = await this.versions.createObject(given, transaction);
       await run.update({ versionId: version.id }, { transaction });
+      await this.inheritStaleness(run.fieldVersionId, version.id, transaction);
       await this.ledger.record(
         {
           actorId: run.createdBy,
@@ -140,5 +143,15 @@ export class EstimatesService implements OnModuleInit {
         transaction,
       );
     });
+  }
+
+  /** The field may have become stale while nobody knew of this result, or may have been so before. */
+  private async inheritStaleness(
+    fieldVersionId: string,
+    versionId: string,
+    transaction: Transaction,
+  ): Promise<void> {
+    const { staleReason } = await this.versions.get(fieldVersionId, transaction);
+    if (staleReason !== null) await this.versions.markStale([versionId], staleReason, transaction);
   }
 }

@@ -2,18 +2,29 @@ import { type PublishedEstimate, PUBLISHED_ESTIMATES } from '@siltlight/common/t
 import type { EstimateDetail } from '@siltlight/common/wire/estimates';
 import type { SliceContent } from '@siltlight/common/wire/slices';
 
+/** Widths and the like, which have no place on an axis of values. */
+const NO_VALUE = ['uncertainty span of forcing'];
+
 type Mark = EstimateDetail['context']['published'][number];
 
+export interface Compared {
+  slice: Pick<SliceContent, 'orbitalAgeKa'>;
+  reference: Pick<SliceContent, 'name'>;
+  /** false: the estimate is of the shortwave alone */
+  longwave: boolean;
+}
+
 /** Published global values for the slice: those of the same kind as marks, the others with the reason they are grey. */
-export function publishedMarks(slice: SliceContent, reference: SliceContent): Mark[] {
+export function publishedMarks(compared: Compared): Mark[] {
   return PUBLISHED_ESTIMATES.flatMap((entry) => {
-    const isOfSlice = ageInWords(entry.timeSlice) === slice.orbitalAgeKa;
-    if (!isOfSlice || entry.value === null || entry.unit !== 'W m-2' || entry.region !== 'global') return [];
-    return [markOf(entry, entry.value, reference)];
+    const isOfSlice = ageInWords(entry.timeSlice) === compared.slice.orbitalAgeKa;
+    const isPlace = entry.unit === 'W m-2' && entry.region === 'global' && !NO_VALUE.includes(entry.quantity);
+    if (!isOfSlice || !isPlace || entry.value === null) return [];
+    return [markOf(entry, entry.value, compared)];
   });
 }
 
-function markOf(entry: PublishedEstimate, value: number, reference: SliceContent): Mark {
+function markOf(entry: PublishedEstimate, value: number, compared: Compared): Mark {
   return {
     id: entry.id,
     source: entry.source,
@@ -22,21 +33,23 @@ function markOf(entry: PublishedEstimate, value: number, reference: SliceContent
     lowWm2: entry.low,
     highWm2: entry.high,
     evidence: entry.evidence,
-    otherKind: otherKind(entry, reference),
+    otherKind: otherKind(entry, compared),
     note: entry.note,
   };
 }
 
+const SPECTRA: Record<string, string> = { net: 'with longwave', SW: 'shortwave alone', LW: 'longwave alone' };
+
 const FORCING = ['instantaneous forcing', 'assessed forcing term'];
 
 /** Only equal kinds are compared: quantity, agent, level, sky, spectrum and reference. */
-function otherKind(entry: PublishedEstimate, reference: SliceContent): string | null {
+function otherKind(entry: PublishedEstimate, { reference, longwave }: Compared): string | null {
   const differences = [
     FORCING.includes(entry.quantity) ? '' : `${entry.quantity}, not a forcing against a reference`,
     entry.forcingAgent === 'dust' ? '' : `of ${entry.forcingAgent}`,
     entry.level === 'TOA' ? '' : `at the ${entry.level}`,
     entry.sky === 'all-sky' ? '' : `${entry.sky}`,
-    entry.spectral === 'net' ? '' : `${entry.spectral} alone`,
+    entry.spectral === (longwave ? 'net' : 'SW') ? '' : (SPECTRA[entry.spectral] ?? entry.spectral),
     entry.referenceState.toLowerCase() === reference.name.toLowerCase()
       ? ''
       : `against ${entry.referenceState}`,

@@ -5,7 +5,7 @@ import type { EstimateRequest, OpticalSetView } from '@siltlight/common/wire/est
 import { BackdropsService } from '../backdrops/backdrops.service';
 import type { FieldContent } from '../fields/field-content';
 import { FieldsService } from '../fields/fields.service';
-import { problem } from '../http/problem';
+import { Problem, problem } from '../http/problem';
 import { OpticalSetsService } from '../optics/optical-sets.service';
 import { SlicesService, type SliceVersion } from '../slices/slices.service';
 import type { EstimatePins } from './estimate-content';
@@ -28,14 +28,16 @@ export class ResolveInputs {
   ) {}
 
   async resolve(request: EstimateRequest): Promise<ResolvedEstimate> {
-    const field = await this.fields.get(request.fieldVersionId);
-    const [opticalSet, backdrop, slice, reference] = await Promise.all([
-      this.sets.get(request.opticalSetVersionId),
-      this.backdrops.get(request.backdropVersionId),
-      this.slices.get(field.content.slice.versionId),
-      this.slices.get(field.content.reference.versionId),
+    const [field, opticalSet, backdrop] = await Promise.all([
+      named('fieldVersionId', request, (id) => this.fields.get(id)),
+      named('opticalSetVersionId', request, (id) => this.sets.get(id)),
+      named('backdropVersionId', request, (id) => this.backdrops.get(id)),
     ]);
     const { content } = field;
+    const [slice, reference] = await Promise.all([
+      this.slices.get(content.slice.versionId),
+      this.slices.get(content.reference.versionId),
+    ]);
     return {
       title: request.title ?? `${content.slice.name} against ${content.reference.name.toLowerCase()}`,
       invented: content.invented,
@@ -69,6 +71,26 @@ export class ResolveInputs {
         },
       },
     };
+  }
+}
+
+type Named = 'fieldVersionId' | 'opticalSetVersionId' | 'backdropVersionId';
+
+/** A version that a request names and that is not there, or is of another kind, is a fault of that field. */
+async function named<Found>(
+  field: Named,
+  request: EstimateRequest,
+  get: (versionId: string) => Promise<Found>,
+): Promise<Found> {
+  const value = request[field];
+  try {
+    return await get(value);
+  } catch (error) {
+    if (!(error instanceof Problem) || error.getStatus() >= 500) throw error;
+    const message = error.extras.detail ?? error.title;
+    throw problem(422, 'version-unusable', `${field} cannot be used`, message, [
+      { pointer: `/${field}`, field, value, message },
+    ]);
   }
 }
 

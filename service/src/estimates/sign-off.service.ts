@@ -76,6 +76,17 @@ export class SignOff {
         },
         transaction,
       );
+      if (run.createdBy === by.id) return;
+      await this.outbox.queue(
+        {
+          toPersonId: run.createdBy,
+          mailKind: 'estimate-withdrawn',
+          subject: `Run ${run.runNumber} is withdrawn: ${run.title}`,
+          lines: [`${by.name} withdrew your estimate "${run.title}".`, reason],
+          linkPath: `/estimates/${run.id}`,
+        },
+        transaction,
+      );
     });
   }
 }

@@ -1,5 +1,14 @@
 import type { EstimateContent } from '../estimates/estimate-content';
 
+export interface CitedDataset {
+  slug: string;
+  number: number;
+  checksum: string;
+  citation: string;
+  /** SPDX identifier */
+  licence: string | null;
+}
+
 /** What a file is made of. No clock and no identifier of the request: the same estimate gives the same bytes. */
 export interface ExportSubject {
   runNumber: number;
@@ -7,6 +16,7 @@ export interface ExportSubject {
   checksum: string;
   slice: { windowYoungKa: number; windowOldKa: number; orbitalAgeKa: number };
   content: EstimateContent;
+  datasets: CitedDataset[];
 }
 
 /** Said in every file, so that nobody mistakes what it holds. */

@@ -7,7 +7,7 @@ import { attachment } from '../http/attachment';
 import { problem } from '../http/problem';
 import { ExportRequestDto, ExportsQueryDto } from './dto';
 import { ExportsService } from './exports.service';
-import { regionalTableDescriptor } from './formats/regional-table';
+import { regionalTableDescriptor } from './formats/regional-table-descriptor';
 
 @Controller('exports')
 @SignedInOnly()

@@ -1,46 +1,26 @@
 import { Injectable, type OnModuleInit } from '@nestjs/common';
 import { InjectModel } from '@nestjs/sequelize';
-import type { exportRequest, ExportFormat, ExportSummary } from '@siltlight/common/wire/exports';
+import type { exportRequest, ExportSummary } from '@siltlight/common/wire/exports';
 import type { Page } from '@siltlight/common/wire/shared';
 import { Op } from 'sequelize';
 import type { z } from 'zod';
 import type { Person } from '../auth/policy';
 import { newId } from '../database/row';
 import { WriteQueue } from '../database/write-queue';
-import { EstimateViews, type LoadedRun } from '../estimates/estimate-views.service';
+import { EstimateViews } from '../estimates/estimate-views.service';
 import { FileStore } from '../files/file-store.service';
 import { pageOf } from '../http/paging';
 import { notFound, problem } from '../http/problem';
 import { JobStates } from '../jobs/job-states.service';
 import { JobsService } from '../jobs/jobs.service';
 import { LedgerService } from '../ledger/ledger.service';
-import { SlicesService } from '../slices/slices.service';
 import { PeopleService } from '../users/people.service';
 import type { ExportSubject } from './export-subject';
-import { regionalTableCsv } from './formats/regional-table';
-import { sliceFieldsNetcdf } from './formats/slice-fields';
+import { ExportSubjects } from './export-subjects.service';
+import { FORMATS } from './formats/formats';
 import { ExportRow } from './models/export-row';
 
 const JOB = 'export';
-
-/** How each format is made; a further one is a line here. */
-const FORMATS: Record<
-  ExportFormat,
-  { mediaType: string; suffix: string; title: string; make: (subject: ExportSubject) => Buffer }
-> = {
-  'regional-table-csv': {
-    mediaType: 'text/csv; charset=utf-8',
-    suffix: 'regions.csv',
-    title: 'regional table, CSV',
-    make: (subject) => Buffer.from(regionalTableCsv(subject), 'utf8'),
-  },
-  'slice-fields-netcdf': {
-    mediaType: 'application/netcdf',
-    suffix: 'fields.nc',
-    title: 'slice fields, NetCDF',
-    make: sliceFieldsNetcdf,
-  },
-};
 
 /** Makes files of estimates as jobs and hands them out. */
 @Injectable()
@@ -48,7 +28,7 @@ export class ExportsService implements OnModuleInit {
   constructor(
     @InjectModel(ExportRow) private readonly rows: typeof ExportRow,
     private readonly estimates: EstimateViews,
-    private readonly slices: SlicesService,
+    private readonly subjects: ExportSubjects,
     private readonly jobs: JobsService,
     private readonly jobStates: JobStates,
     private readonly files: FileStore,
@@ -159,13 +139,7 @@ export class ExportsService implements OnModuleInit {
   }
 
   async subjectOf(row: ExportRow, reader: Person): Promise<ExportSubject> {
-    return this.subject(await this.estimates.load(row.estimateId, reader));
-  }
-
-  private async subject({ run, version, state }: LoadedRun): Promise<ExportSubject> {
-    const { content, checksum } = version!;
-    const slice = await this.slices.get(content.pins.slice.versionId);
-    return { runNumber: run.runNumber, state, checksum, slice: slice.content, content };
+    return this.subjects.of(await this.estimates.load(row.estimateId, reader));
   }
 
   private async make(
@@ -174,7 +148,7 @@ export class ExportsService implements OnModuleInit {
   ): Promise<void> {
     const row = (await this.rows.findByPk(exportId))!;
     await report(0.1, 'reading the estimate');
-    const subject = await this.subject(await this.estimates.byId(row.estimateId));
+    const subject = await this.subjects.of(await this.estimates.byId(row.estimateId));
     const { make, suffix, mediaType } = FORMATS[row.format];
     const bytes = make(subject);
     await report(0.8, 'keeping the file');

@@ -1,6 +1,6 @@
-import type { EstimateRegionResult, ForcingTriple } from '@siltlight/common/wire/estimates';
+import type { EstimateRegionResult, EstimateResult, ForcingTriple } from '@siltlight/common/wire/estimates';
 import { type CsvCell, csvTable } from '../../http/csv';
-import { type ExportSubject, standing } from '../export-subject';
+import type { ExportSubject } from '../export-subject';
 
 interface Column {
   name: string;
@@ -35,7 +35,11 @@ const forcingColumns: Column[] = KINDS.flatMap(([kind, kindTitle]) =>
 export const REGIONAL_COLUMNS: readonly Column[] = [
   { name: 'slice', title: 'time slice', type: 'string' },
   { name: 'reference', title: 'reference slice', type: 'string' },
-  { name: 'region_code', title: 'AR6 reference region; GLOBAL for the global mean', type: 'string' },
+  {
+    name: 'region_code',
+    title: 'AR6 reference region; GLOBAL for the global mean, NONE for places in no region',
+    type: 'string',
+  },
   { name: 'region_name', title: 'name of the region', type: 'string' },
   { name: 'area_share', title: 'share of the sphere', type: 'number', unit: '1' },
   { name: 'site_count', title: 'sites with a flux in both windows', type: 'integer' },
@@ -56,9 +60,12 @@ export const REGIONAL_COLUMNS: readonly Column[] = [
   ...forcingColumns,
 ];
 
-/** Regional time-slice table: a heading row, then the globe, then the regions in table order. */
+/**
+ * Regional time-slice table: a heading row, the globe, the regions in table order, and last what lies in no region,
+ * so that the area-weighted forcings of all rows but the first add up to the first.
+ */
 export function regionalTableCsv({ content }: ExportSubject): string {
-  const { global, regions, label } = content.result;
+  const { global, regions, outside, label } = content.result;
   const head: CsvCell[] = [label.sliceName, label.referenceName];
   const globe = [
     ...head,
@@ -77,6 +84,7 @@ export function regionalTableCsv({ content }: ExportSubject): string {
     REGIONAL_COLUMNS.map(({ name }) => name),
     globe,
     ...regions.map((region) => [...head, ...regionCells(region)]),
+    [...head, ...outsideCells(outside)],
   ]);
 }
 
@@ -97,50 +105,16 @@ function regionCells(region: EstimateRegionResult): CsvCell[] {
   ];
 }
 
+/** Its share is below a thousandth of a percent: only what the sum needs. */
+function outsideCells({ areaShare, forcing }: EstimateResult['outside']): CsvCell[] {
+  const unknown = (count: number): CsvCell[] => Array.from({ length: count }, () => null);
+  const name = 'Places in no region';
+  return ['NONE', name, areaShare, null, '', '', ...unknown(2), ...triple(forcing), ...unknown(9)];
+}
+
 function triple(values: ForcingTriple): CsvCell[] {
   return PARTS.flatMap(([part]) => {
     const { value, low, high } = values[part];
     return [value, low, high];
   });
-}
-
-/** Frictionless Data Package of the table: names, types, units, missing values, where it came from. */
-export function regionalTableDescriptor(
-  subject: ExportSubject,
-  file: { fileName: string; sha256: string; bytes: number },
-) {
-  const { content, runNumber, checksum } = subject;
-  return {
-    profile: 'tabular-data-package',
-    name: `siltlight-run-${runNumber}`,
-    title: content.title,
-    description: standing(subject),
-    sources: content.pins.datasetVersions.map((pin) => ({
-      title: `dataset version ${pin.versionId}`,
-      sha256: pin.checksum,
-    })),
-    'siltlight:estimateChecksum': checksum,
-    resources: [
-      {
-        name: 'regional-table',
-        path: file.fileName,
-        profile: 'tabular-data-resource',
-        format: 'csv',
-        mediatype: 'text/csv',
-        encoding: 'utf-8',
-        bytes: file.bytes,
-        hash: `sha256:${file.sha256}`,
-        schema: {
-          fields: REGIONAL_COLUMNS.map(({ name, title, type, unit }) => ({
-            name,
-            title,
-            type,
-            ...(unit ? { unit } : {}),
-          })),
-          missingValues: [''],
-          primaryKey: ['slice', 'reference', 'region_code'],
-        },
-      },
-    ],
-  };
 }

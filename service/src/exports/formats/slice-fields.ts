@@ -28,7 +28,7 @@ function sliceFieldsDataset(subject: ExportSubject, field: SliceField): NcDatase
 }
 
 function globalAttributes(subject: ExportSubject): NcDataset['attributes'] {
-  const { content, runNumber, checksum } = subject;
+  const { content, runNumber, checksum, datasets } = subject;
   const { pins, request, codeVersion } = content;
   return {
     Conventions: 'CF-1.11',
@@ -42,9 +42,11 @@ function globalAttributes(subject: ExportSubject): NcDataset['attributes'] {
     provenance_field_sha256: pins.field.checksum,
     provenance_optical_set: `${pins.opticalSet.title}; sha256 ${pins.opticalSet.checksum}`,
     provenance_backdrop: `${pins.backdrop.title}; sha256 ${pins.backdrop.checksum}`,
-    provenance_dataset_versions: pins.datasetVersions
-      .map((pin) => `${pin.versionId} sha256 ${pin.checksum}`)
+    provenance_dataset_versions: datasets
+      .map(({ slug, number, checksum: sha256 }) => `${slug} version ${number} sha256 ${sha256}`)
       .join('; '),
+    citations: datasets.map(({ citation }) => citation).join(' | '),
+    license: datasets.map(({ slug, licence }) => `${slug}: ${licence ?? 'not stated'}`).join('; '),
   };
 }
 
@@ -111,7 +113,6 @@ function scalars({ slice }: ExportSubject): NcVariable[] {
       attributes: {
         long_name: 'age of orbit and gases of the slice, thousands of years before 1950 CE',
         units: '1000 years',
-        positive: 'down',
         bounds: 'slice_age_bounds',
         comment: 'the bounds are the evidence window, apart from the age',
       },

@@ -88,7 +88,7 @@ const MATERIALS = [
     inMicrometres,
     'Querry (1985), Optical constants, Contractor Report CRDC-CR-85034',
     CC0,
-    'Rows of negative k beyond 20 µm are left out: no mineral amplifies light.',
+    'Rows of negative k (11, from 47.6 µm on) are left out: no mineral amplifies light.',
   ],
   ['illite', 'Illite', 'ri_other-clays-illite-nk-Querry.yml', inMicrometres, QUERRY_1987, CC0, NO_VISIBLE],
   [

@@ -292,7 +292,7 @@ export const REFRACTIVE_INDICES: readonly RefractiveIndexTable[] = [
     title: 'Hematite, ordinary ray',
     source: 'Querry (1985), Optical constants, Contractor Report CRDC-CR-85034',
     licence: 'CC0 1.0 (optics/refractive-index/LICENSE-refractiveindex-database.txt)',
-    note: 'Rows of negative k beyond 20 µm are left out: no mineral amplifies light.',
+    note: 'Rows of negative k (11, from 47.6 µm on) are left out: no mineral amplifies light.',
     wavelengthsUm: [
       0.21, 0.22, 0.23, 0.24, 0.25, 0.26, 0.27, 0.28, 0.29, 0.3, 0.31, 0.32, 0.33, 0.34, 0.35, 0.36, 0.37,
       0.38, 0.39, 0.4, 0.41, 0.42, 0.43, 0.44, 0.45, 0.46, 0.47, 0.48, 0.49, 0.5, 0.51, 0.52, 0.53, 0.54,

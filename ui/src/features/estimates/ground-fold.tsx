@@ -2,6 +2,7 @@ import { Select } from '@fluentui/react-components';
 import type { BackdropView } from '@siltlight/common/wire/estimates';
 import { FormField } from '../../shared/form/form-field';
 import { formatNumber } from '../../shared/number/format';
+import '../../shared/table/table.css';
 import { NumberField } from './number-field';
 import type { FoldProps } from './set-up-folds';
 
@@ -72,7 +73,7 @@ export function GroundFold({ setUp, backdrops, problem, onChange }: Props) {
             </table>
           </div>
           <p className="sl-small sl-muted">
-            {backdrop.source}. {backdrop.note}
+            Source: {backdrop.source}. {backdrop.note}
           </p>
         </>
       )}

@@ -15,7 +15,7 @@ export function Headline({ result, context }: Props) {
         <p className="headline-say">{headlineOf(result)}</p>
         <BigNumber of={result.global.forcing.netWm2} />
         <p className="estimate-label">{labelLine(result)}</p>
-        <ExplainedCautions of={result.cautions} first={3} />
+        <ExplainedCautions of={result.cautions} first={2} />
       </div>
       <Outcomes result={result} />
       <Beside result={result} context={context} />

@@ -4,6 +4,7 @@ import { Figure } from '../../shared/figure/figure';
 import { Amount } from '../../shared/number/amount';
 import { formatNumber } from '../../shared/number/format';
 import { ForcingUnit, Unit } from '../../shared/number/unit';
+import '../../shared/table/table.css';
 
 type Triple = { shortwaveWm2: Interval | null; longwaveWm2: Interval | null; netWm2: Interval | null };
 
@@ -34,7 +35,7 @@ export function KindsTable({ result }: { result: EstimateResult }) {
       }
     >
       <div className="fold-scroll" tabIndex={0} role="region" aria-label="Forcing by kind and sky">
-        <table className="sl-table">
+        <table className="sl-table kinds">
           <thead>
             <tr>
               <th scope="col">Kind</th>

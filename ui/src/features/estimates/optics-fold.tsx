@@ -4,6 +4,7 @@ import type { ReactNode } from 'react';
 import { FormField } from '../../shared/form/form-field';
 import { formatNumber } from '../../shared/number/format';
 import { Unit } from '../../shared/number/unit';
+import '../../shared/table/table.css';
 import { NumberField } from './number-field';
 import type { FoldProps } from './set-up-folds';
 
@@ -92,7 +93,7 @@ function OpticsTable({ set }: { set: OpticalSetView }) {
         </tbody>
       </table>
       <p className="sl-small sl-muted">
-        Particles {set.sizeCutoff}. {set.source}. Evidence: {set.evidence}. {set.note}
+        Particles {set.sizeCutoff}. Source: {set.source}. Evidence: {set.evidence}. {set.note}
       </p>
     </>
   );

@@ -10,6 +10,7 @@ import type { FieldDetail } from '@siltlight/common/wire/slices';
 import type { Page } from '@siltlight/common/wire/shared';
 import { infiniteQueryOptions, keepPreviousData, queryOptions } from '@tanstack/react-query';
 import { api } from '../../shared/api/client';
+import { readableEstimate, readableResult } from './readable-result';
 
 export const opticalSetsQuery = queryOptions({
   queryKey: ['optical-sets'],
@@ -56,7 +57,7 @@ const isWaiting = (state: string | undefined) => state === 'queued' || state ===
 export const estimateQuery = (id: string) =>
   queryOptions({
     queryKey: ['estimates', 'one', id],
-    queryFn: () => api.get<EstimateDetail>(`/estimates/${id}`),
+    queryFn: async () => readableEstimate(await api.get<EstimateDetail>(`/estimates/${id}`)),
     refetchInterval: (query) => (isWaiting(query.state.data?.state) ? POLL_MS : false),
   });
 
@@ -64,7 +65,8 @@ export const estimateQuery = (id: string) =>
 export const estimatePreviewQuery = (request: EstimateRequest | null) =>
   queryOptions({
     queryKey: ['estimates', 'preview', request],
-    queryFn: ({ signal }) => api.post<EstimateResult>('/estimates/preview', request, { signal }),
+    queryFn: async ({ signal }) =>
+      readableResult(await api.post<EstimateResult>('/estimates/preview', request, { signal })),
     enabled: request !== null,
     placeholderData: keepPreviousData,
     staleTime: Infinity,

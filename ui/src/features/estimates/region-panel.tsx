@@ -2,12 +2,12 @@ import { Button } from '@fluentui/react-components';
 import { Dismiss20Regular } from '@fluentui/react-icons';
 import type { EstimateRegionResult } from '@siltlight/common/wire/estimates';
 import type { FieldSite } from '@siltlight/common/wire/slices';
-import type { ReactNode } from 'react';
+import { useEffect, useRef, type ReactNode } from 'react';
 import { Link } from 'react-router-dom';
 import { ExplainedCautions } from '../../shared/feedback/explained-cautions';
 import { Amount } from '../../shared/number/amount';
 import { counted, formatNumber, formatPercent } from '../../shared/number/format';
-import { ForcingUnit, Unit } from '../../shared/number/unit';
+import { Unit } from '../../shared/number/unit';
 
 type Props = {
   region: EstimateRegionResult;
@@ -21,8 +21,12 @@ type Props = {
 
 /** One region: its numbers, and the sites they rest on, each a link to its samples. */
 export function RegionPanel({ region, sites, traceOf, statusText, onClose }: Props) {
+  const panel = useRef<HTMLElement>(null);
+  useEffect(() => {
+    panel.current?.scrollIntoView?.({ block: 'nearest' });
+  }, [region.code]);
   return (
-    <section className="region-panel" aria-label={`Region ${region.name}`}>
+    <section ref={panel} className="region-panel" aria-label={`Region ${region.name}`}>
       <header>
         <h2>{region.name}</h2>
         <span className="sl-small sl-muted">
@@ -52,17 +56,13 @@ export function RegionPanel({ region, sites, traceOf, statusText, onClose }: Pro
 function RegionNumbers({ region }: { region: EstimateRegionResult }) {
   const depth = (value: number) => formatNumber(value, { figures: 2 });
   const lines: [ReactNode, ReactNode][] = [
-    ['Net forcing', <Amount key="net" of={region.forcing.netWm2} />],
-    ['Shortwave', <Amount key="sw" of={region.forcing.shortwaveWm2} />],
-    ['Longwave', <Amount key="lw" of={region.forcing.longwaveWm2} />],
-    ['Direct effect of the slice (another kind)', <Amount key="de" of={region.directEffect.netWm2} />],
+    ['Net forcing', <Amount key="net" of={region.forcing.netWm2} unit="W m-2" />],
+    ['Shortwave', <Amount key="sw" of={region.forcing.shortwaveWm2} unit="W m-2" />],
+    ['Longwave', <Amount key="lw" of={region.forcing.longwaveWm2} unit="W m-2" />],
+    ['Direct effect of the slice (another kind)', <Amount key="de" of={region.directEffect.netWm2} unit="W m-2" />],
   ];
   return (
     <dl className="region-numbers">
-      <dt className="sl-muted">
-        <ForcingUnit />, 5–95 %
-      </dt>
-      <dd />
       {lines.map(([name, value], at) => (
         <div key={at}>
           <dt>{name}</dt>

@@ -1,5 +1,6 @@
 import type { EstimateResult } from '@siltlight/common/wire/estimates';
 import { formatNumber } from '../../shared/number/format';
+import { Prose } from '../../shared/number/prose';
 import type { DataColumn } from '../../shared/table/column';
 import { DataTable } from '../../shared/table/data-table';
 
@@ -9,9 +10,9 @@ const names: Record<string, string> = {
   singleScatteringAlbedo: 'Single-scattering albedo',
   asymmetry: 'Asymmetry parameter',
   transmittance: 'Transmittance above the dust',
-  surfaceAlbedoFactor: 'Surface albedo, factor on the map',
-  cloudFractionFactor: 'Cloud fraction, factor on the map',
-  opticalDepthFactor: 'Optical depth of the base field, factor',
+  surfaceAlbedoFactor: 'Surface albedo, factor',
+  cloudFractionFactor: 'Cloud fraction, factor',
+  opticalDepthFactor: 'Base optical depth, factor',
   shortwaveEfficiencyWm2: 'Shortwave efficiency',
   longwaveEfficiencyWm2: 'Longwave efficiency',
 };
@@ -29,9 +30,28 @@ const number = (id: 'low' | 'central' | 'high', header: string): DataColumn<Vari
 });
 
 const columns: DataColumn<Varied>[] = [
-  { id: 'name', header: 'Input', value: (row) => inputName(row.name) },
-  { id: 'unit', header: 'Unit', value: (row) => (row.unit === '1' ? '' : row.unit), wideOnly: true },
-  { id: 'shape', header: 'Shape', value: (row) => row.distribution, wideOnly: true },
+  {
+    id: 'name',
+    header: 'Input',
+    value: (row) => inputName(row.name) + (row.unit === '1' ? '' : `, ${row.unit}`),
+    cell: (row) => (
+      <span className="sl-unit">
+        {inputName(row.name)}
+        {row.unit !== '1' && (
+          <>
+            , <Prose text={row.unit} />
+          </>
+        )}
+      </span>
+    ),
+  },
+  {
+    id: 'shape',
+    header: 'Shape',
+    value: (row) => row.distribution,
+    cell: (row) => <span className="sl-unit">{row.distribution}</span>,
+    wideOnly: true,
+  },
   number('low', 'Low'),
   number('central', 'Middle'),
   number('high', 'High'),

@@ -91,7 +91,11 @@ const usedColumns = (field: FieldDetail): DataColumn<FieldSite>[] => [
     id: 'site',
     header: 'Site',
     value: (row) => row.site,
-    cell: (row) => (field.versionId ? <Link to={tracePath(field.versionId, row)}>{row.site}</Link> : <b>{row.site}</b>),
+    cell: (row) => (
+      <span className="sl-unit">
+        {field.versionId ? <Link to={tracePath(field.versionId, row)}>{row.site}</Link> : <b>{row.site}</b>}
+      </span>
+    ),
   },
   datasetColumn,
   flux(`Flux, ${field.sliceName}`, (row) => row.sliceFluxGM2Yr),
@@ -105,7 +109,7 @@ const usedColumns = (field: FieldDetail): DataColumn<FieldSite>[] => [
   },
   {
     id: 'samples',
-    header: 'Samples, slice and reference',
+    header: 'Samples',
     value: (row) => row.sliceSamples + row.referenceSamples,
     cell: (row) => `${row.sliceSamples} and ${row.referenceSamples}`,
     align: 'right',

@@ -2,6 +2,7 @@ import type { DatasetSummary } from '@siltlight/common/wire/datasets';
 import type { FieldDetail } from '@siltlight/common/wire/slices';
 import { keepPreviousData, queryOptions } from '@tanstack/react-query';
 import { api } from '../../shared/api/client';
+import { regionTitle } from '../../shared/map/region-name';
 
 /** What is sent to build a field; mirrors the schema `fieldRequest`. */
 export type FieldChoice = {
@@ -12,10 +13,16 @@ export type FieldChoice = {
   sizeCutoff?: string;
 };
 
+/** Regions by the names people read. */
+const readable = (field: FieldDetail): FieldDetail => ({
+  ...field,
+  regions: field.regions.map((region) => ({ ...region, name: regionTitle(region.name) })),
+});
+
 export const fieldQuery = (versionId: string) =>
   queryOptions({
     queryKey: ['fields', versionId],
-    queryFn: () => api.get<FieldDetail>(`/fields/${versionId}`),
+    queryFn: async () => readable(await api.get<FieldDetail>(`/fields/${versionId}`)),
     staleTime: 60_000,
   });
 
@@ -28,7 +35,8 @@ export const datasetsQuery = queryOptions({
 export const fieldPreviewQuery = (choice: FieldChoice) =>
   queryOptions({
     queryKey: ['fields', 'preview', choice],
-    queryFn: ({ signal }) => api.post<FieldDetail>('/fields/preview', choice, { signal }),
+    queryFn: async ({ signal }) =>
+      readable(await api.post<FieldDetail>('/fields/preview', choice, { signal })),
     enabled: choice.datasetVersionIds.length > 0,
     placeholderData: keepPreviousData,
     staleTime: Infinity,

@@ -3,6 +3,7 @@ import type { ReactNode } from 'react';
 import { Figure } from '../../shared/figure/figure';
 import { formatNumber } from '../../shared/number/format';
 import { ForcingUnit } from '../../shared/number/unit';
+import '../../shared/table/table.css';
 import { orbitalAgeText } from './slice-words';
 
 const rows: { name: string; head: ReactNode; decimals: number; of: (slice: SliceContent) => number | null }[] = [

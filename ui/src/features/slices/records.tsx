@@ -77,12 +77,12 @@ export function Records({ records, sliceName }: { records: SliceRecord[]; sliceN
   }
   return (
     <div className="slice-records">
-      <Figure plain title="Records" sub={`${counted(records.length, 'site')} with samples inside the window`}>
+      <div className="slice-ruled">
         <DataTable
-          bare
           filterable
           address="records-"
-          caption="Records covering the slice"
+          caption="Records"
+          sub={`${counted(records.length, 'site')} with samples inside the window`}
           columns={columns}
           rows={records}
           rowKey={keyOf}
@@ -92,7 +92,7 @@ export function Records({ records, sliceName }: { records: SliceRecord[]; sliceN
           onHover={setHovered}
           empty={null}
         />
-      </Figure>
+      </div>
       <Figure
         title="Where they lie"
         sub={hovered ? hovered.site : 'point at a row to find its site'}

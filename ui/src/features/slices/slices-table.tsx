@@ -41,8 +41,8 @@ const columns: DataColumn<Row>[] = [
   { id: 'reference', header: 'Against', value: (row) => row.referenceName, wideOnly: true },
   {
     id: 'kind',
-    header: 'Kind',
-    value: (row) => (row.kind === 'scenario' ? 'scenario' : row.stage ? 'stage' : 'evidence'),
+    header: 'Rests on',
+    value: (row) => (row.kind === 'scenario' ? 'scenario, no records' : 'from records'),
     wideOnly: true,
   },
   {

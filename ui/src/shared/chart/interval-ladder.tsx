@@ -94,7 +94,10 @@ const hasInterval = (rung: Rung): rung is Rung & { low: number; high: number } =
 
 const valueText = (rung: Rung) =>
   formatNumber(rung.value, {
-    decimals: hasInterval(rung) ? decimalsForInterval(rung.low, rung.high) : 2,
+    // Two at least, as the numbers beside it have, unless they are large.
+    decimals: hasInterval(rung)
+      ? Math.max(Math.abs(rung.value) < 10 ? 2 : 0, decimalsForInterval(rung.low, rung.high))
+      : 2,
     signed: true,
   });
 

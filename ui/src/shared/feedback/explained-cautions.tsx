@@ -1,6 +1,7 @@
 import { Popover, PopoverSurface, PopoverTrigger } from '@fluentui/react-components';
 import { Warning16Filled } from '@fluentui/react-icons';
 import { useState } from 'react';
+import { Prose } from '../number/prose';
 import { isStrong, reasonOf } from './caution-reasons';
 import './feedback.css';
 import './explained-cautions.css';
@@ -23,7 +24,7 @@ export function ExplainedCautions({ of, label = 'Cautions', first = 4 }: Props) 
           <li key={line.code + line.message} className={isStrong(line.code) ? 'caution strong' : 'caution'}>
             <Warning16Filled aria-hidden />
             <span>
-              {line.message} <Why line={line} />
+              <Prose text={line.message} /> <Why line={line} />
             </span>
           </li>
         ))}

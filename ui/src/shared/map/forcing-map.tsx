@@ -1,6 +1,6 @@
 import { lazy, Suspense, useMemo, useState } from 'react';
 import { LoadingFigure } from '../feedback/loading';
-import { formatNumber } from '../number/format';
+import { formatForcing, formatNumber } from '../number/format';
 import { useColourMode } from '../theme/colour-mode';
 import type { MapData } from './map-data';
 import { MapLegend } from './map-legend';
@@ -73,6 +73,7 @@ export function ForcingMap(props: Props) {
       <div className="map-scale">
         <MapLegend
           {...{ ramp, limit, showHatch, showSites }}
+          showRamp={Boolean(values ?? field)}
           floor={floor ?? limit / 1000}
           hatchMeans={
             hatched && hatched.size > 0
@@ -85,7 +86,7 @@ export function ForcingMap(props: Props) {
         />
         <span className="map-named">
           {named &&
-            `${named.name}${typeof value === 'number' ? `: ${formatNumber(value, { figures: 3, signed: ramp === 'forcing' })} ${unit ?? ''}` : ''}`}
+            `${named.name}${typeof value === 'number' ? `: ${ramp === 'forcing' ? formatForcing(value) : formatNumber(value, { figures: 2 })} ${unit ?? ''}` : ''}`}
         </span>
       </div>
     </div>

@@ -5,6 +5,8 @@ import { siteDiameterPx } from './map-option';
 import './map.css';
 
 type Props = {
+  /** False where nothing is coloured: sites alone. */
+  showRamp?: boolean;
   ramp: RampName;
   limit: number;
   floor: number;
@@ -24,18 +26,20 @@ export function MapLegend(props: Props) {
   const { ramp, limit, floor } = props;
   return (
     <>
-      <div
-        className="map-bar"
-        role="img"
-        aria-label={`Colours from ${tickTexts(ramp, limit, floor).join(' to ')}`}
-      >
-        <div style={{ background: gradient(ramps[ramp][mode]) }} />
-        <div>
-          {tickTexts(ramp, limit, floor).map((text) => (
-            <span key={text}>{text}</span>
-          ))}
+      {props.showRamp !== false && (
+        <div
+          className="map-bar"
+          role="img"
+          aria-label={`Colours from ${tickTexts(ramp, limit, floor).join(' to ')}`}
+        >
+          <div style={{ background: gradient(ramps[ramp][mode]) }} />
+          <div>
+            {tickTexts(ramp, limit, floor).map((text) => (
+              <span key={text}>{text}</span>
+            ))}
+          </div>
         </div>
-      </div>
+      )}
       {props.hatchMeans && (
         <button
           type="button"

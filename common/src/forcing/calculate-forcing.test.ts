@@ -68,7 +68,7 @@ test('simple albedo is −Q T² (1−A_c) Δα, and darkening bright ground warm
 
 test('an unknown method is refused with the list of those there are', () => {
   expect(() => calculateForcing({ method: 'guess' } as unknown as ForcingRequest)).toThrow(
-    /method is guess; it must be one of thin-layer-daily, thin-layer, simple-albedo, efficiency/,
+    /method is guess; it must be one of slanted-layer, two-stream, multi-stream, thin-layer-daily, thin-layer, simple-albedo, efficiency/,
   );
 });
 

@@ -1,12 +1,16 @@
 import { readChoice } from '../physical/check-fields';
 import type { EfficiencyInput } from './efficiency';
+import type { LayerMethodInput } from './layer-method';
 import type { ForcingMethod, ForcingResult } from './method';
 import { FORCING_METHODS, type ForcingMethodId } from './methods';
 import type { SimpleAlbedoInput } from './simple-albedo';
 import type { ThinLayerDailyInput } from './thin-layer-daily';
 import type { ThinLayerInput } from './thin-layer';
+import type { TwoStreamInput } from './two-stream';
 
 export type ForcingRequest =
+  | ({ method: 'slanted-layer' | 'multi-stream' } & LayerMethodInput)
+  | ({ method: 'two-stream' } & TwoStreamInput)
   | ({ method: 'efficiency' } & EfficiencyInput)
   | ({ method: 'simple-albedo' } & SimpleAlbedoInput)
   | ({ method: 'thin-layer' } & ThinLayerInput)

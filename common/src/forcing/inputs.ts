@@ -1,5 +1,6 @@
 import { readNumber, refuseUnused } from '../physical/check-fields';
 import { SOLAR_CONSTANT_WM2 } from '../physical/constants';
+import { MIN_COS_ZENITH } from './layer-scheme';
 import type { MethodInput } from './method';
 
 /** Inputs that several methods share, each declared once: title, unit and range. */
@@ -12,6 +13,7 @@ export const INPUTS = {
   transmittance: input('transmittance', 'One-way transmittance above the layer', '', 0, 1),
   cloudFraction: input('cloudFraction', 'Cloud fraction', '', 0, 1),
   highCloudFraction: input('highCloudFraction', 'High cloud fraction', '', 0, 1),
+  cosSolarZenith: input('cosSolarZenith', 'Cosine of the solar zenith angle', '', MIN_COS_ZENITH, 1),
   insolationWm2: input('insolationWm2', 'Mean insolation at the top of the atmosphere', 'W m⁻²', 0, 10_000),
   albedoChange: input('albedoChange', 'Change of albedo', '', -1, 1),
   shortwaveEfficiencyWm2: input(

@@ -61,11 +61,12 @@ function opticsCautions({ singleScatteringAlbedo }: ThinLayerState): Caution[] {
   ];
 }
 
-function surfaceCautions({
+/** Near the critical ground and over bright ground, by whatever formula. */
+export function surfaceCautions({
   singleScatteringAlbedo,
   surfaceAlbedo,
   upscatterFraction,
-}: ThinLayerState): Caution[] {
+}: Pick<ThinLayerState, 'singleScatteringAlbedo' | 'surfaceAlbedo' | 'upscatterFraction'>): Caution[] {
   const found: Caution[] = [];
   const critical = criticalSurfaceAlbedo(singleScatteringAlbedo, upscatterFraction);
   if (Math.abs(surfaceAlbedo - critical) < 0.1) {

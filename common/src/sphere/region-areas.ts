@@ -1,28 +1,24 @@
+import { readChoice, refuseUnused } from '../physical/check-fields';
 import { EARTH_RADIUS_M } from '../physical/constants';
-import { DomainError, type Caution } from '../physical/domain-error';
+import type { Caution } from '../physical/domain-error';
 import { planarPolygonAreaSr } from './polygon-area';
 import { ar6Regions, REGION_SETS } from './region-set';
 
 export interface RegionAreas {
   regions: { code: string; name: string; areaKm2: number; shareOfSphere: number }[];
-  method: string;
+  method: { name: string; source: string };
   cautions: Caution[];
 }
 
 /**
  * Areas of a region set's polygons as published, each on its own.
  *
- * @throws DomainError for a region set that is not at hand
+ * @throws DomainError for a region set that is missing or not at hand, and for a field that is not used
  * Checked against: reference/checks/general/ar6_region_areas.csv.
  */
-export function calculateRegionAreas({ regionSet }: { regionSet: string }): RegionAreas {
-  if (!(REGION_SETS as readonly string[]).includes(regionSet)) {
-    throw new DomainError('unknown-region-set', {
-      field: 'regionSet',
-      value: regionSet,
-      allowed: REGION_SETS,
-    });
-  }
+export function calculateRegionAreas(request: { regionSet: string }): RegionAreas {
+  refuseUnused(request, ['regionSet']);
+  readChoice(request, 'regionSet', REGION_SETS);
   const regions = ar6Regions().map(({ code, name, parts }) => {
     const areaSr = parts.reduce((sum, ring) => sum + planarPolygonAreaSr(ring), 0);
     return {
@@ -34,9 +30,10 @@ export function calculateRegionAreas({ regionSet }: { regionSet: string }): Regi
   });
   return {
     regions,
-    method:
-      'Exact area between straight longitude–latitude edges on a sphere of 6371.007181 km; ' +
-      'IPCC AR6 reference regions version 4, Iturbide et al. (2020), doi:10.5194/essd-12-2959-2020.',
+    method: {
+      name: 'Exact area between straight longitude–latitude edges on a sphere of 6371.007181 km',
+      source: 'IPCC AR6 reference regions version 4, Iturbide et al. (2020), doi:10.5194/essd-12-2959-2020',
+    },
     cautions: [
       {
         code: 'regions-overlap',

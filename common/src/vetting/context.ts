@@ -1,6 +1,8 @@
 import type { SampleRow } from '../dataset/sample-row';
 import type { RawWorkbook } from '../sheet/grid';
 import type { Mapping } from '../sheet/mapping';
+import type { Archive } from './archive';
+import type { StewardLimits } from './limits';
 
 /** Answers of the metadata form. Every key optional: what is missing is what rules ask for. */
 export interface SubmissionMetadata {
@@ -9,7 +11,7 @@ export interface SubmissionMetadata {
   licence?: string;
   publicationDoi?: string;
   publicationCitation?: string;
-  archive?: 'ice' | 'marine' | 'loess' | 'lake' | 'peat' | 'other';
+  archive?: Archive;
   method?: string;
   sizeCutoff?: string;
   dustDefinition?: string;
@@ -20,13 +22,28 @@ export interface SubmissionMetadata {
   note?: string;
 }
 
-/** A row already in Holdings, for checks against what is known. */
+/** A site already in Holdings, for checks against what is known. */
 export interface HeldSite {
   site: string;
   latitudeDeg: number;
   longitudeDeg: number;
   datasetTitle: string;
   archive: string | null;
+  /** median of its dust fluxes [g m⁻² yr⁻¹], for the comparison with neighbours; absent: not compared */
+  medianFluxGM2Yr?: number | null;
+}
+
+/** A value that Holdings have already, for the search for values given twice. */
+export interface HeldSample {
+  site: string;
+  latitudeDeg: number;
+  longitudeDeg: number;
+  datasetTitle: string;
+  /** dust, nssCa, Fe … */
+  quantity: string;
+  sizeCutoff: string | null;
+  ageKaBp: number;
+  fluxGM2Yr: number;
 }
 
 /** Everything a rule may look at. Rules are pure: the same context gives the same findings in the same order. */
@@ -38,12 +55,14 @@ export interface VettingContext {
   /** false for a file checked without a form: questions the form would ask are not held against the file */
   formOffered: boolean;
   heldSites: HeldSite[];
-  /** limits of each rule by id, after the stewards' changes */
-  limits: Record<string, Record<string, number>>;
+  /** values of published datasets near the file's sites or under their names; absent: V56 and V57 look within the file */
+  heldSamples?: readonly HeldSample[];
+  /** what stewards changed of the rules' limits, by rule id; empty: the defaults hold */
+  limits: StewardLimits;
   /** raw text that was resolved to "missing" or below detection, by code */
   missingCodes: Record<string, number>;
   /** dataset kind; `dust-flux` when absent */
-  kind?: 'dust-flux' | 'point-optical-depth';
+  kind?: string;
   /** rows of the upload this one replaces, for the list of differences */
   earlierRows?: SampleRow[];
 }

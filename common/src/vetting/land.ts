@@ -1,5 +1,6 @@
+import { regionAt } from '../sphere/region-set';
 import { LAND_FRACTION_COLUMNS, LAND_FRACTION_ROWS, landFraction2Deg } from '../tables/land-fraction-2deg';
-import type { Archive } from './samples';
+import type { Archive } from './archive';
 
 /** Looks up the present-day land share of the 2° cell of a position. */
 export type LandShare = (latitudeDeg: number, longitudeDeg: number) => number;
@@ -22,6 +23,15 @@ export function landShare(): LandShare {
 export function fitsSurface(archive: Archive, share: number): boolean {
   if (archive === 'other') return true;
   return archive === 'marine' ? share < 1 : share > 0;
+}
+
+/** AR6 regions with the two ice sheets; GIC also holds Iceland and the bare coasts of Greenland. */
+const ICE_SHEET_REGIONS: ReadonlySet<string> = new Set(['GIC', 'EAN', 'WAN']);
+
+/** Whether a position lies in a region with an ice sheet: coarse, and mountain glaciers and small caps lie elsewhere. */
+export function nearIceSheet(latitudeDeg: number, longitudeDeg: number): boolean {
+  if (latitudeDeg > -60 && latitudeDeg < 58) return false; // south of Greenland and north of Antarctica
+  return ICE_SHEET_REGIONS.has(regionAt(longitudeDeg, latitudeDeg) ?? '');
 }
 
 export const onGlobe = (latitudeDeg: number, longitudeDeg: number): boolean =>

@@ -1,8 +1,7 @@
 import type { SampleRow } from '../dataset/sample-row';
-import type { SubmissionMetadata, VettingContext } from './context';
+import type { Archive } from './archive';
+import type { VettingContext } from './context';
 import { groupBy, numberOf } from './place';
-
-export type Archive = NonNullable<SubmissionMetadata['archive']>;
 
 /** Words people write for an archive, in the languages the headings come in. */
 const ARCHIVE_WORDS: [Archive, RegExp][] = [
@@ -15,11 +14,13 @@ const ARCHIVE_WORDS: [Archive, RegExp][] = [
 
 /** Archive of a row: its own column first, then the form. Null when neither says. */
 export function archiveOf(context: VettingContext, row: SampleRow): Archive | null {
-  if (row.archive !== null && row.archive.trim() !== '') {
-    return ARCHIVE_WORDS.find(([, words]) => words.test(row.archive!))?.[0] ?? 'other';
-  }
+  if (row.archive !== null && row.archive.trim() !== '') return archiveOfText(row.archive);
   return context.metadata.archive ?? null;
 }
+
+/** Archive that a text names; 'other' when it names none of ours. */
+export const archiveOfText = (text: string): Archive =>
+  ARCHIVE_WORDS.find(([, words]) => words.test(text))?.[0] ?? 'other';
 
 /** The field that carries the value a dataset is about. */
 export const valueField = (context: VettingContext): 'fluxGM2Yr' | 'aod' =>
@@ -45,11 +46,8 @@ export function countedRows(context: VettingContext): SampleRow[] {
 
 /** Site names as compared: case, spaces, hyphens and accents do not matter. */
 export function siteKey(name: string): string {
-  return name
-    .normalize('NFKD')
-    .replace(/\p{M}/gu, '')
-    .toLowerCase()
-    .replace(/[\s_\-–.,]+/g, '');
+  const plain = /^[ -~]*$/.test(name) ? name : name.normalize('NFKD').replace(/\p{M}/gu, '');
+  return plain.toLowerCase().replace(/[\s_\-–.,]+/g, '');
 }
 
 /** Rows of one core: same sheet, site and quantity, in the order of the file. */
@@ -82,8 +80,19 @@ export interface Site {
   rows: SampleRow[];
 }
 
+/** Sites by context: half a dozen rules of one run ask for them. */
+const known = new WeakMap<VettingContext, Site[]>();
+
 /** Named positions of the file, in the order they come; the same name at another position is another entry. */
 export function sitesOf(context: VettingContext): Site[] {
+  const before = known.get(context);
+  if (before) return before;
+  const sites = findSites(context);
+  known.set(context, sites);
+  return sites;
+}
+
+function findSites(context: VettingContext): Site[] {
   const sites = new Map<string, Site>();
   for (const row of countedRows(context)) {
     const { site, latitudeDeg, longitudeDeg } = row;

@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { answers, context, row, rows, unreadable } from './rules/rows.test-support';
-import type { SubmissionMetadata } from './context';
+import type { SubmissionMetadata, VettingContext } from './context';
 import { rules } from './rules/index';
 import { counts, vet } from './vet';
 
@@ -116,4 +116,31 @@ test('no rule breaks on odd numbers and texts', () => {
     }),
     { numRuns: 60, seed: 7 },
   );
+});
+
+test('the time for distinct sites grows with their number and not with its square, in whatever way they lie', () => {
+  // Four times the sites: 4 when linear, 16 when quadratic; 10 leaves room for a busy machine.
+  const made = (n: number, widthDeg: number) =>
+    context(
+      Array.from({ length: n }, (_, i) =>
+        row({
+          row: i + 2,
+          site: `Site ${i}`,
+          latitudeDeg: widthDeg * ((i * 0.618034) % 1) - widthDeg / 2,
+          longitudeDeg: 2 * widthDeg * ((i * 0.754877) % 1) - widthDeg,
+        }),
+      ),
+      { workbook: { fileName: 'sites.csv', format: 'csv', sheets: [], readNotes: [] } },
+    );
+  const seconds = (samples: VettingContext) => {
+    const start = performance.now();
+    vet(samples, { rules: wide });
+    return performance.now() - start;
+  };
+  const wide = rules.filter(({ id }) => ['V10', 'V11', 'V12', 'V15', 'V57', 'V58', 'V59'].includes(id));
+  for (const widthDeg of [170, 1, 0]) {
+    seconds(made(500, widthDeg));
+    const least = (n: number) => Math.min(seconds(made(n, widthDeg)), seconds(made(n, widthDeg)));
+    expect(least(8000) / least(2000), `${widthDeg}°`).toBeLessThan(10);
+  }
 });

@@ -6,7 +6,7 @@ import { rules as allRules } from './rules/index';
 import { isWithoutValue } from './samples';
 
 export interface VetOptions {
-  /** which stages to run; what a file and its form can answer when absent */
+  /** which stages to run; what a file, its form and Holdings can answer when absent */
   stages?: readonly Stage[];
   rules?: readonly Rule[];
 }
@@ -23,7 +23,9 @@ export interface VetCounts {
   byRule: Record<string, number>;
 }
 
-const FILE_AND_FORM: readonly Stage[] = ['file', 'submission'];
+const INTAKE: readonly Stage[] = ['file', 'submission', 'holdings'];
+/** Kinds a rule looks at that names none: those whose rows are samples. */
+const SAMPLE_KINDS: readonly string[] = ['dust-flux', 'point-optical-depth'];
 
 /**
  * Runs every rule of the wanted stages that can run and answers its findings in reading order:
@@ -34,9 +36,12 @@ const FILE_AND_FORM: readonly Stage[] = ['file', 'submission'];
  * Odd data never throws: should a rule break, that is said as a warning under the rule's own id.
  */
 export function vet(context: VettingContext, options: VetOptions = {}): Finding[] {
-  const stages = options.stages ?? FILE_AND_FORM;
+  const stages = options.stages ?? INTAKE;
   const kept = { ...context, rows: context.rows.filter((row) => row.leftOut === undefined) };
-  const wanted = (options.rules ?? allRules).filter((rule) => !rule.notRun && stages.includes(rule.stage));
+  const kind = context.kind ?? 'dust-flux';
+  const wanted = (options.rules ?? allRules).filter(
+    (rule) => !rule.notRun && stages.includes(rule.stage) && (rule.kinds ?? SAMPLE_KINDS).includes(kind),
+  );
   const placed = placements(kept, wanted);
   placed.sort(
     (a, b) => a.sheet - b.sheet || a.row - b.row || a.column - b.column || a.rule - b.rule || a.nth - b.nth,

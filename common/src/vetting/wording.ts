@@ -49,12 +49,3 @@ export function statements(context: VettingContext): string {
     .filter((text) => text !== undefined)
     .join(' \n ');
 }
-
-/** A limit of a rule after the stewards' changes, else its default. */
-export function limitsOf<T extends Record<string, number>>(
-  context: VettingContext,
-  id: string,
-  defaults: T,
-): T {
-  return { ...defaults, ...(context.limits[id] as Partial<T> | undefined) };
-}

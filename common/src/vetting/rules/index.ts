@@ -46,6 +46,7 @@ import { fineBelowBulk } from './v52-fine-below-bulk';
 import { sizeMethod } from './v53-size-method';
 import { uncertainty } from './v54-uncertainty';
 import { relativeUncertainty } from './v55-relative-uncertainty';
+import { heldDuplicates } from './v56-held-duplicates';
 import { repeatedSample } from './v57-repeated-sample';
 import { neighbours } from './v58-neighbours';
 import { fewNeighbours } from './v59-few-neighbours';
@@ -55,6 +56,7 @@ import { wavelengthConversion } from './v63-wavelength-conversion';
 import { angstromExponent } from './v64-angstrom-exponent';
 import { aerosolSpecies } from './v65-aerosol-species';
 import { humidityState } from './v66-humidity-state';
+import { scatteringRange } from './v69-scattering-range';
 import { reference } from './v77-reference';
 import { orcid } from './v78-orcid';
 import { licence } from './v79-licence';
@@ -107,6 +109,7 @@ const runRules: Rule[] = [
   sizeMethod,
   uncertainty,
   relativeUncertainty,
+  heldDuplicates,
   repeatedSample,
   neighbours,
   fewNeighbours,
@@ -116,6 +119,7 @@ const runRules: Rule[] = [
   angstromExponent,
   aerosolSpecies,
   humidityState,
+  scatteringRange,
   reference,
   orcid,
   licence,

@@ -56,11 +56,6 @@ export const notRunRules: Rule[] = [
     why: 'River mud and turbidites count as dust in every chemical or weighed flux.',
     notRun: 'Not run: no list of river mouths is shipped.',
   }),
-  later('V56', 'held-duplicates', 'Same sample already in another compilation', 'warning', 'holdings', {
-    needs: ['site', 'ageKaBp', 'fluxGM2Yr'],
-    why: 'One core in two compilations counts twice in every regional mean.',
-    notRun: 'Runs against Holdings when values of other dataset versions can be compared.',
-  }),
   later('V60', 'slice-mean', 'Slice mean not weighted by duration', 'warning', 'field', {
     needs: ['fluxGM2Yr'],
     why: 'The arithmetic mean weighted by time conserves mass; a mean of logarithms does not.',
@@ -76,20 +71,6 @@ export const notRunRules: Rule[] = [
     why: 'Deposition times lifetime times extinction efficiency closes the chain within a factor of five.',
     notRun: 'Runs when a field is built that holds both optical depth and deposition.',
   }),
-  later(
-    'V69',
-    'scattering-range',
-    'Single-scattering albedo or asymmetry impossible',
-    'error',
-    'submission',
-    {
-      needs: ['single-scattering albedo', 'asymmetry parameter'],
-      source: 'physical bounds',
-      why: 'A dust albedo below 0.7 is no dust.',
-      notRun:
-        'Not run: no dataset kind has columns for them; optical sets refuse such values where they are typed.',
-    },
-  ),
   later('V70', 'months', 'Annual mean from fewer than nine months', 'warning', 'submission', {
     needs: ['date'],
     why: 'Dust is seasonal: half a year may hold nearly all or hardly any of it.',

@@ -1,9 +1,10 @@
 import type { SampleRow } from '../../dataset/sample-row';
 import type { VettingContext } from '../context';
+import { limitsOf } from '../limits';
 import { columnPlace, groupBy } from '../place';
 import type { Rule } from '../rule';
 import { archiveOf } from '../samples';
-import { limitsOf, shown } from '../wording';
+import { shown } from '../wording';
 
 /**
  * Usual size of a median flux by archive [g m⁻² yr⁻¹], from memory: middle, on a log scale, of the ranges of
@@ -25,12 +26,12 @@ export const columnMedian: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const limits = limitsOf(context, 'V07', LIMITS);
     const positive = context.rows.filter((row) => (row.fluxGM2Yr ?? 0) > 0 && row.quantity === 'dust');
     const groups = groupBy(positive, (row) => `${row.sheet}\u0000${groupOf(context, row) ?? ''}`);
     for (const rows of groups.values()) {
       const group = groupOf(context, rows[0]!);
       if (group === null || rows.length < 3) continue;
+      const limits = limitsOf(context, 'V07', LIMITS, archiveOf(context, rows[0]!));
       const median = middle(rows.map((row) => row.fluxGM2Yr!));
       const slip = Math.log10(median / limits[group]);
       if (Math.abs(slip) <= limits.log10Width) continue;

@@ -1,8 +1,9 @@
 import { presentText } from '../cell-problems';
+import { limitsOf } from '../limits';
 import { filePlace, placeOf } from '../place';
 import type { Rule } from '../rule';
 import { sitesOf } from '../samples';
-import { counted, limitsOf } from '../wording';
+import { counted } from '../wording';
 
 const LIMITS = { decimals: 2, wholeDegreeShare: 0.5 };
 

@@ -18,6 +18,10 @@ examplesOf(archiveSurface, {
     ),
   },
   fires: {
+    'an ice core lies in the Alps, where no ice sheet is known': {
+      context: context(rows({ latitudeDeg: 45.93, longitudeDeg: 7.87 }), as('ice')),
+      first: { severity: 'warning', subject: 'ice-sheet', remedyKind: 'waive' },
+    },
     'a marine core lies in Kazakhstan': {
       context: context(rows({ latitudeDeg: 47, longitudeDeg: 67 }), as('marine')),
       first: { severity: 'warning', row: 2, remedyKind: 'waive' },

@@ -1,8 +1,9 @@
 import type { VettingContext } from '../context';
+import { limitsOf } from '../limits';
 import { distinctCells, placeOf, refusedHit } from '../place';
 import type { Rule, RuleHit } from '../rule';
 import { countedRows } from '../samples';
-import { limitsOf, shown } from '../wording';
+import { shown } from '../wording';
 
 const LIMITS = { elevationMinM: -430, elevationMaxM: 8850, waterDepthMinM: 0, waterDepthMaxM: 11000 };
 

@@ -2,7 +2,7 @@ import type { VettingContext } from '../context';
 import { placeOf } from '../place';
 import type { Rule, RuleHit } from '../rule';
 import { siteKey, sitesOf, type Site } from '../samples';
-import { limitsOf } from '../wording';
+import { limitsOf } from '../limits';
 
 const LIMITS = { sameNameApartDeg: 0.1, otherNameWithinDeg: 0.01 };
 
@@ -23,34 +23,33 @@ export const siteNames: Rule = {
     const held = context.heldSites.map((site) => ({
       ...site,
       name: site.site,
-      from: `dataset "${site.datasetTitle}"`,
+      key: siteKey(site.site),
+      from: () => `dataset "${site.datasetTitle}"`,
     }));
     const known = new Neighbourhood(limits.otherNameWithinDeg);
     const names = new Map<string, Known>();
     for (const site of held) {
       known.add(site);
-      if (!names.has(siteKey(site.name))) names.set(siteKey(site.name), site);
+      if (!names.has(site.key)) names.set(site.key, site);
     }
     for (const site of sitesOf(context)) {
-      yield* compare(
-        context,
-        site,
-        names.get(siteKey(site.name)),
-        known.sameAs(site),
-        limits.sameNameApartDeg,
-      );
-      const entry: Known = { ...site, from: `row ${site.rows[0]!.row} of sheet "${site.rows[0]!.sheet}"` };
+      const { name, latitudeDeg, longitudeDeg, rows } = site;
+      const from = () => `row ${rows[0]!.row} of sheet "${rows[0]!.sheet}"`;
+      const entry: Known = { name, key: siteKey(name), latitudeDeg, longitudeDeg, from };
+      yield* compare(context, site, names.get(entry.key), known.sameAs(entry), limits.sameNameApartDeg);
       known.add(entry);
-      if (!names.has(siteKey(site.name))) names.set(siteKey(site.name), entry);
+      if (!names.has(entry.key)) names.set(entry.key, entry);
     }
   },
 };
 
 interface Known {
   name: string;
+  /** name as compared */
+  key: string;
   latitudeDeg: number;
   longitudeDeg: number;
-  from: string;
+  from: () => string;
 }
 
 function* compare(
@@ -66,7 +65,7 @@ function* compare(
     yield {
       ...place,
       subject: 'same-name',
-      message: `"${site.name}" stands at ${where}, but ${namesake.from} has that name at ${namesake.latitudeDeg}°, ${namesake.longitudeDeg}°.`,
+      message: `"${site.name}" stands at ${where}, but ${namesake.from()} has that name at ${namesake.latitudeDeg}°, ${namesake.longitudeDeg}°.`,
       remedy: 'Type the right position, give the other core its own name, or waive it with a reason.',
       remedyKind: 'waive',
     };
@@ -75,7 +74,7 @@ function* compare(
     yield {
       ...place,
       subject: 'same-place',
-      message: `"${site.name}" at ${where} stands where ${neighbour.from} has "${neighbour.name}".`,
+      message: `"${site.name}" at ${where} stands where ${neighbour.from()} has "${neighbour.name}".`,
       remedy: 'Use one name if it is one core, or waive it if they are two.',
       remedyKind: 'waive',
     };
@@ -101,17 +100,17 @@ class Neighbourhood {
   }
 
   /** A site of another name within the width. */
-  sameAs(site: Site): Known | undefined {
+  sameAs(site: Known): Known | undefined {
     for (const [dy, dx] of AROUND) {
       for (const other of this.cells.get(this.key(site, dy, dx)) ?? []) {
         const near = separationDeg(site, other) < this.widthDeg;
-        if (near && siteKey(other.name) !== siteKey(site.name)) return other;
+        if (near && other.key !== site.key) return other;
       }
     }
     return undefined;
   }
 
-  private key(site: Known | Site, dy: number, dx: number): string {
+  private key(site: Known, dy: number, dx: number): string {
     const around = Math.round(360 / this.widthDeg);
     const column = Math.floor((((site.longitudeDeg % 360) + 360) % 360) / this.widthDeg) + dx;
     return `${Math.floor(site.latitudeDeg / this.widthDeg) + dy},${(column + around) % around}`;

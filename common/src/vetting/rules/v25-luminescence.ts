@@ -1,7 +1,8 @@
+import { limitsOf } from '../limits';
 import { sheetPlace, bySheet } from '../place';
 import type { Rule } from '../rule';
 import { ageOf } from '../samples';
-import { counted, limitsOf, shown, statements } from '../wording';
+import { counted, shown, statements } from '../wording';
 
 const LIMITS = { saturationKa: 30 };
 const LUMINESCENCE = /luminescence|lumineszenz|\bOSL\b|\bIRSL\b/i;

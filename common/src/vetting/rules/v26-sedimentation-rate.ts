@@ -1,8 +1,9 @@
+import { limitsOf } from '../limits';
 import { placeOf } from '../place';
 import type { Rule } from '../rule';
 import { archiveOf, cores } from '../samples';
 import { sedimentationSteps } from '../sedimentation';
-import { limitsOf, shown } from '../wording';
+import { shown } from '../wording';
 
 const LIMITS = {
   marineMin: 0.1,
@@ -28,10 +29,10 @@ export const sedimentationRate: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const limits = limitsOf(context, 'V26', LIMITS);
     for (const core of cores(context)) {
       const archive = archiveOf(context, core[0]!);
       if (archive === null || archive === 'ice' || archive === 'other') continue;
+      const limits = limitsOf(context, 'V26', LIMITS, archive);
       const [min, max] = [limits[`${archive}Min`], limits[`${archive}Max`]];
       for (const { row, rateCmKyr, stated } of sedimentationSteps(core)) {
         if (rateCmKyr >= min && rateCmKyr <= max) continue;

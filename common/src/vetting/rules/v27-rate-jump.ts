@@ -1,8 +1,9 @@
+import { limitsOf } from '../limits';
 import { placeOf } from '../place';
 import type { Rule } from '../rule';
-import { cores } from '../samples';
+import { archiveOf, cores } from '../samples';
 import { sedimentationSteps } from '../sedimentation';
-import { limitsOf, shown } from '../wording';
+import { shown } from '../wording';
 
 const LIMITS = { factor: 10 };
 
@@ -19,8 +20,8 @@ export const rateJump: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const { factor } = limitsOf(context, 'V27', LIMITS);
     for (const core of cores(context)) {
+      const { factor } = limitsOf(context, 'V27', LIMITS, archiveOf(context, core[0]!));
       const steps = sedimentationSteps(core).filter(({ rateCmKyr }) => rateCmKyr > 0);
       for (const [i, { row, rateCmKyr, stated }] of steps.entries()) {
         const before = steps[i - 1];

@@ -1,7 +1,8 @@
+import { limitsOf } from '../limits';
 import { placeOf, refusedHit } from '../place';
 import type { Rule } from '../rule';
 import { archiveOf, countedRows } from '../samples';
-import { limitsOf, shown } from '../wording';
+import { shown } from '../wording';
 
 const LIMITS = {
   min: 0.2,
@@ -32,13 +33,13 @@ export const densityRange: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const limits = limitsOf(context, 'V29', LIMITS);
     for (const row of countedRows(context)) {
       const refused = refusedHit(context, row, 'densityGCm3', 'dry bulk density');
       if (refused) yield refused;
       const density = row.densityGCm3;
       if (density === null) continue;
       const archive = archiveOf(context, row);
+      const limits = limitsOf(context, 'V29', LIMITS, archive);
       const own = archive === null || archive === 'ice' || archive === 'other' ? null : archive;
       const floor = own === null ? limits.min : Math.min(limits.min, limits[`${own}Min`]);
       const [min, max] = own === null ? [limits.min, limits.max] : [limits[`${own}Min`], limits[`${own}Max`]];

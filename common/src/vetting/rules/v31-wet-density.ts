@@ -1,7 +1,8 @@
+import { limitsOf } from '../limits';
 import { bySheet, columnPlace } from '../place';
 import type { Rule } from '../rule';
 import { archiveOf } from '../samples';
-import { counted, limitsOf, shown } from '../wording';
+import { counted, shown } from '../wording';
 
 const LIMITS = { wetFromGCm3: 1.5 };
 
@@ -18,7 +19,7 @@ export const wetDensity: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const { wetFromGCm3 } = limitsOf(context, 'V31', LIMITS);
+    const { wetFromGCm3 } = limitsOf(context, 'V31', LIMITS, 'marine');
     for (const [sheet, rows] of bySheet(context.rows)) {
       const wet = rows.filter(
         (row) => (row.densityGCm3 ?? 0) > wetFromGCm3 && archiveOf(context, row) === 'marine',

@@ -2,7 +2,7 @@ import type { SampleRow } from '../../dataset/sample-row';
 import { unusualFlux } from '../flux-range';
 import type { Rule } from '../rule';
 import { archiveOf } from '../samples';
-import { limitsOf } from '../wording';
+import { limitsOf } from '../limits';
 
 const LIMITS = { min: 1e-4, max: 10, plateauMin: 1e-4, plateauMax: 3e-2, plateauFromM: 2500 };
 
@@ -20,7 +20,7 @@ export const fluxIce: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const limits = limitsOf(context, 'V33', LIMITS);
+    const limits = limitsOf(context, 'V33', LIMITS, 'ice');
     for (const row of context.rows) {
       if (archiveOf(context, row) !== 'ice') continue;
       yield* onPlateau(row, limits.plateauFromM)

@@ -2,7 +2,7 @@ import type { SampleRow } from '../../dataset/sample-row';
 import { unusualFlux } from '../flux-range';
 import type { Rule } from '../rule';
 import { archiveOf } from '../samples';
-import { limitsOf } from '../wording';
+import { limitsOf } from '../limits';
 
 const LIMITS = { min: 0.01, max: 100, nearSourcesMax: 1000 };
 
@@ -19,7 +19,7 @@ export const fluxMarine: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const { min, max, nearSourcesMax } = limitsOf(context, 'V34', LIMITS);
+    const { min, max, nearSourcesMax } = limitsOf(context, 'V34', LIMITS, 'marine');
     for (const row of context.rows) {
       if (archiveOf(context, row) !== 'marine') continue;
       yield* nearSources(row)

@@ -1,8 +1,9 @@
 import { unusualFlux } from '../flux-range';
+import { limitsOf } from '../limits';
 import { placeOf } from '../place';
 import type { Rule } from '../rule';
 import { archiveOf } from '../samples';
-import { limitsOf, shown } from '../wording';
+import { shown } from '../wording';
 
 const LIMITS = { min: 5, max: 1000, impossible: 20000 };
 
@@ -19,7 +20,7 @@ export const fluxLoess: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const { min, max, impossible } = limitsOf(context, 'V35', LIMITS);
+    const { min, max, impossible } = limitsOf(context, 'V35', LIMITS, 'loess');
     for (const row of context.rows) {
       if (archiveOf(context, row) !== 'loess') continue;
       if (row.quantity === 'dust' && (row.fluxGM2Yr ?? 0) > impossible) {

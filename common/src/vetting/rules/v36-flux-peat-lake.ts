@@ -1,7 +1,7 @@
 import { unusualFlux } from '../flux-range';
 import type { Rule } from '../rule';
 import { archiveOf } from '../samples';
-import { limitsOf } from '../wording';
+import { limitsOf } from '../limits';
 
 const LIMITS = { min: 0.1, max: 300 };
 
@@ -18,10 +18,11 @@ export const fluxPeatLake: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const { min, max } = limitsOf(context, 'V36', LIMITS);
     for (const row of context.rows) {
       const archive = archiveOf(context, row);
-      if (archive === 'peat' || archive === 'lake') yield* unusualFlux(context, row, [min, max], archive);
+      if (archive !== 'peat' && archive !== 'lake') continue;
+      const { min, max } = limitsOf(context, 'V36', LIMITS, archive);
+      yield* unusualFlux(context, row, [min, max], archive);
     }
   },
 };

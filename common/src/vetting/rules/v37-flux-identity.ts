@@ -1,8 +1,9 @@
 import type { SampleRow } from '../../dataset/sample-row';
+import { limitsOf } from '../limits';
 import { placeOf } from '../place';
 import type { Rule } from '../rule';
-import { countedRows } from '../samples';
-import { limitsOf, shown } from '../wording';
+import { archiveOf, countedRows } from '../samples';
+import { shown } from '../wording';
 
 const LIMITS = { tolerance: 0.05 };
 
@@ -26,8 +27,8 @@ export const fluxIdentity: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const { tolerance } = limitsOf(context, 'V37', LIMITS);
     for (const row of countedRows(context)) {
+      const { tolerance } = limitsOf(context, 'V37', LIMITS, archiveOf(context, row));
       const product = productOf(row);
       if (product === null || row.fluxGM2Yr === null) continue;
       if (Math.abs(row.fluxGM2Yr - product) <= tolerance * Math.abs(product)) continue;

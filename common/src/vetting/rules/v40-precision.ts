@@ -1,7 +1,10 @@
+import type { TracedValue } from '../../dataset/sample-row';
 import { presentText } from '../cell-problems';
-import { bySheet, columnPlace } from '../place';
+import { limitsOf } from '../limits';
+import { columnPlace, groupBy } from '../place';
 import type { Rule } from '../rule';
-import { counted, limitsOf, statements } from '../wording';
+import { archiveOf } from '../samples';
+import { counted, statements } from '../wording';
 
 const LIMITS = { significantFigures: 5 };
 
@@ -18,11 +21,13 @@ export const precision: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const { significantFigures } = limitsOf(context, 'V40', LIMITS);
     if (/digiti[sz]ed|from (a |the )?figure|recomputed|recalculated/i.test(statements(context))) return;
-    for (const [sheet, rows] of bySheet(context.rows)) {
+    const groups = groupBy(context.rows, (row) => `${row.sheet}\u0000${archiveOf(context, row) ?? ''}`);
+    for (const rows of groups.values()) {
+      const { sheet } = rows[0]!;
+      const { significantFigures } = limitsOf(context, 'V40', LIMITS, archiveOf(context, rows[0]!));
       const long = rows.filter(
-        (row) => row.fluxGM2Yr !== null && figuresOf(row.cells.fluxGM2Yr) > significantFigures,
+        (row) => row.fluxGM2Yr !== null && significantFiguresOf(row.cells.fluxGM2Yr) > significantFigures,
       );
       if (long.length === 0) continue;
       yield {
@@ -35,8 +40,13 @@ export const precision: Rule = {
   },
 };
 
-/** Significant figures as written; zeros before the first other digit do not count. */
-function figuresOf(traced: Parameters<typeof presentText>[0] | undefined): number {
-  const mantissa = traced ? presentText(traced).replace(/e.*$/i, '') : '';
-  return mantissa.replace(/\D/g, '').replace(/^0+/, '').length;
+/**
+ * Significant figures of a value as the file writes it, not as it was converted: those of its first number alone,
+ * without thousands separators, power of ten, uncertainty behind ± and unit. Zeros before the first other digit
+ * do not count, nor those that end a number without decimal or thousands sign.
+ */
+function significantFiguresOf(traced: TracedValue | undefined): number {
+  const number = /\d[\d.,'’\u00a0\u202f ]*/u.exec(traced ? presentText(traced) : '')?.[0] ?? '';
+  const digits = number.replace(/\D/g, '').replace(/^0+/, '');
+  return (/[.,]/.test(number) ? digits : digits.replace(/0+$/, '')).length;
 }

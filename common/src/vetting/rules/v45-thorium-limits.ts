@@ -1,8 +1,9 @@
+import { limitsOf } from '../limits';
 import { isNormalised, marineRows } from '../marine';
 import { bySheet, sheetPlace } from '../place';
 import type { Rule } from '../rule';
 import { ageOf } from '../samples';
-import { counted, limitsOf } from '../wording';
+import { counted } from '../wording';
 
 const LIMITS = { waterDepthMinM: 1000, ageMaxKa: 300 };
 
@@ -20,7 +21,7 @@ export const thoriumLimits: Rule = {
 
   *check(context) {
     if (!isNormalised(context)) return;
-    const { waterDepthMinM, ageMaxKa } = limitsOf(context, 'V45', LIMITS);
+    const { waterDepthMinM, ageMaxKa } = limitsOf(context, 'V45', LIMITS, 'marine');
     for (const [sheet, rows] of bySheet(marineRows(context))) {
       const shallow = rows.filter((row) => row.waterDepthM !== null && row.waterDepthM < waterDepthMinM);
       const old = rows.filter((row) => (ageOf(row) ?? 0) > ageMaxKa);

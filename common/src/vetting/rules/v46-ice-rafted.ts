@@ -1,7 +1,8 @@
+import { limitsOf } from '../limits';
 import { marineRows } from '../marine';
 import { groupBy, placeOf } from '../place';
 import type { Rule } from '../rule';
-import { limitsOf, statements } from '../wording';
+import { statements } from '../wording';
 import type { SampleRow } from '../../dataset/sample-row';
 
 const LIMITS = { northFromDeg: 40, southFromDeg: -45 };
@@ -21,7 +22,7 @@ export const iceRafted: Rule = {
 
   *check(context) {
     if (IRD.test(statements(context))) return;
-    const limits = limitsOf(context, 'V46', LIMITS);
+    const limits = limitsOf(context, 'V46', LIMITS, 'marine');
     const exposed = marineRows(context).filter((row) => isExposed(row, limits));
     for (const rows of groupBy(exposed, (row) => `${row.sheet}\u0000${row.site ?? ''}`).values()) {
       if (rows.some((row) => IRD.test(row.remark ?? ''))) continue;

@@ -1,7 +1,8 @@
+import { limitsOf } from '../limits';
 import { placeOf } from '../place';
 import type { Rule } from '../rule';
 import { ageOf, archiveOf, countedRows } from '../samples';
-import { limitsOf, shown } from '../wording';
+import { shown } from '../wording';
 
 const LIMITS = { holoceneOldKa: 11.7, lastInterglacialYoungKa: 115, lastInterglacialOldKa: 130 };
 const SOIL = /pal(a)?eosol|\bsoil\b|boden/i;
@@ -19,7 +20,7 @@ export const soilFormation: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const limits = limitsOf(context, 'V50', LIMITS);
+    const limits = limitsOf(context, 'V50', LIMITS, 'loess');
     for (const row of countedRows(context)) {
       if (archiveOf(context, row) !== 'loess') continue;
       const age = ageOf(row);

@@ -1,9 +1,10 @@
 import type { SampleRow } from '../../dataset/sample-row';
-import { bySheet, columnPlace, numberOf } from '../place';
+import { limitsOf } from '../limits';
+import { columnPlace, groupBy, numberOf } from '../place';
 import type { Rule } from '../rule';
-import { valueOf } from '../samples';
+import { archiveOf, valueOf } from '../samples';
 import { sigmaField } from '../uncertainty';
-import { counted, firstFew, limitsOf, shown } from '../wording';
+import { counted, firstFew, shown } from '../wording';
 
 const LIMITS = { min: 0.03, max: 3 };
 
@@ -20,13 +21,15 @@ export const relativeUncertainty: Rule = {
   limits: LIMITS,
 
   *check(context) {
-    const { min, max } = limitsOf(context, 'V55', LIMITS);
     const field = sigmaField(context);
     const relative = (row: SampleRow): number | null => {
       const [value, sigma] = [valueOf(context, row), numberOf(row, field)];
       return value === null || sigma === null || value <= 0 || sigma <= 0 ? null : sigma / value;
     };
-    for (const [sheet, rows] of bySheet(context.rows)) {
+    const groups = groupBy(context.rows, (row) => `${row.sheet}\u0000${archiveOf(context, row) ?? ''}`);
+    for (const rows of groups.values()) {
+      const { sheet } = rows[0]!;
+      const { min, max } = limitsOf(context, 'V55', LIMITS, archiveOf(context, rows[0]!));
       const small = rows.filter((row) => (relative(row) ?? min) < min);
       const large = rows.filter((row) => (relative(row) ?? max) > max);
       for (const [found, what] of [

@@ -1,13 +1,14 @@
 import type { SampleRow } from '../../dataset/sample-row';
+import type { VettingContext } from '../context';
+import { coreKey, heldByCore } from '../held-values';
 import { groupBy, placeOf } from '../place';
-import type { Rule } from '../rule';
+import type { Rule, RuleHit } from '../rule';
 import { ageOf, countedRows, depthOf, siteKey, valueOf } from '../samples';
-import { shown } from '../wording';
+import { counted, shown } from '../wording';
 
 /**
- * The same core, depth, age, quantity and size cut-off twice in one file.
- *
- * Limit of the check: it looks within the file; the same core in two datasets is for V56, with Holdings.
+ * The same core, depth, age, quantity and size cut-off twice in one file; and with another value in Holdings,
+ * said once a site and dataset (the same value there is for V56).
  */
 export const repeatedSample: Rule = {
   id: 'V57',
@@ -36,8 +37,35 @@ export const repeatedSample: Rule = {
         };
       }
     }
+    yield* heldWithOtherValue(context, complete);
   },
 };
+
+function* heldWithOtherValue(context: VettingContext, rows: SampleRow[]): Iterable<RuleHit> {
+  const held = heldByCore(context);
+  if (held.size === 0) return;
+  const pairs = rows.flatMap((row) => {
+    const flux = row.fluxGM2Yr;
+    const known = held.get(coreKey(row.site ?? '', row.quantity, row.sizeCutoff, ageOf(row)!)) ?? [];
+    const other = known.find(({ fluxGM2Yr }) => flux !== null && !agree(flux, fluxGM2Yr));
+    return other ? [{ row, other }] : [];
+  });
+  const groups = groupBy(pairs, ({ row, other }) => `${row.sheet}\u0000${siteKey(row.site!)}\u0000${other.datasetTitle}`);
+  for (const group of groups.values()) {
+    const { row, other } = group[0]!;
+    yield {
+      ...placeOf(context, row, 'fluxGM2Yr'),
+      subject: `held ${other.datasetTitle}`.slice(0, 100),
+      message: `${counted(group.length, 'sample')} of ${row.site} in dataset "${other.datasetTitle}" with another value: at ${shown(other.ageKaBp)} ka BP ${shown(other.fluxGM2Yr)} g m-2 yr-1 there and ${describe(row)} here.`,
+      remedy:
+        'Keep the values of the newest age model: name the older dataset in the note, or leave these rows out with a reason.',
+      remedyKind: 'leave-out',
+    };
+  }
+}
+
+/** To 2 %, as V56 calls two values the same. */
+const agree = (a: number, b: number): boolean => Math.abs(a - b) <= 0.02 * Math.abs(b);
 
 const describe = (row: SampleRow): string =>
   row.fluxGM2Yr === null ? 'no flux' : `${shown(row.fluxGM2Yr)} g m-2 yr-1`;

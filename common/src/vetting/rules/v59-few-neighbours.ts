@@ -1,7 +1,8 @@
+import { limitsOf } from '../limits';
 import { neighbouredSites } from '../neighbours';
 import { filePlace } from '../place';
 import type { Rule } from '../rule';
-import { counted, firstFew, limitsOf } from '../wording';
+import { counted, firstFew } from '../wording';
 
 const LIMITS = { radiusKm: 1000, minNeighbours: 3 };
 
@@ -20,7 +21,7 @@ export const fewNeighbours: Rule = {
   *check(context) {
     const { radiusKm, minNeighbours } = limitsOf(context, 'V59', LIMITS);
     const all = neighbouredSites(context, Math.min(radiusKm, 1100));
-    const alone = all.filter(({ neighbours }) => neighbours.length < minNeighbours);
+    const alone = all.filter(({ count }) => count < minNeighbours);
     if (alone.length === 0) return;
     yield {
       ...filePlace('fluxGM2Yr'),

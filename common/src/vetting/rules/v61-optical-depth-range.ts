@@ -1,7 +1,8 @@
+import { limitsOf } from '../limits';
 import { opticalDepths } from '../optical-depth';
 import { placeOf, refusedHit } from '../place';
 import type { Rule } from '../rule';
-import { limitsOf, shown } from '../wording';
+import { shown } from '../wording';
 
 const LIMITS = { noiseMin: -0.05, unusual: 3, max: 5 };
 

@@ -1,7 +1,8 @@
+import { limitsOf } from '../limits';
 import { opticalDepths } from '../optical-depth';
 import { bySheet, numberOf, placeOf, sheetPlace } from '../place';
 import type { Rule } from '../rule';
-import { counted, limitsOf, shown } from '../wording';
+import { counted, shown } from '../wording';
 
 const LIMITS = { minNm: 300, maxNm: 2500 };
 

@@ -1,7 +1,8 @@
+import { limitsOf } from '../limits';
 import { opticalDepths } from '../optical-depth';
 import { bySheet, numberOf, sheetPlace } from '../place';
 import type { Rule } from '../rule';
-import { counted, limitsOf } from '../wording';
+import { counted } from '../wording';
 
 const LIMITS = { defaultFromNm: 440, defaultToNm: 675 };
 

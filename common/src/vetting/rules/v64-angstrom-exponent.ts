@@ -1,7 +1,8 @@
+import { limitsOf } from '../limits';
 import { opticalDepths } from '../optical-depth';
 import { numberOf, placeOf, textOf } from '../place';
 import type { Rule } from '../rule';
-import { limitsOf, shown } from '../wording';
+import { shown } from '../wording';
 
 const LIMITS = { min: -0.5, max: 2.5, dustMax: 0.75 };
 

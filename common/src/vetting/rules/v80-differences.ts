@@ -1,13 +1,15 @@
-import type { SampleRow } from '../../dataset/sample-row';
+import type { SampleRow, TracedValue } from '../../dataset/sample-row';
+import type { VettingContext } from '../context';
+import { limitsOf } from '../limits';
 import { filePlace, placeOf } from '../place';
-import type { Rule } from '../rule';
-import { ageOf, depthOf, siteKey } from '../samples';
-import { counted, limitsOf, shown } from '../wording';
+import { pairRows } from '../row-pairs';
+import type { Rule, RuleHit } from '../rule';
+import { ageOf } from '../samples';
+import { counted, shown } from '../wording';
 
 const LIMITS = { mostListed: 1000 };
-const COMPARED = ['fluxGM2Yr', 'fluxSigmaGM2Yr', 'latitudeDeg', 'longitudeDeg', 'ageSigmaKa'] as const;
 
-/** What a file uploaded again changes against the one before: cell by cell, then rows added and gone. */
+/** What a file uploaded again changes against the one before: every field cell by cell, then rows added and gone. */
 export const differences: Rule = {
   id: 'V80',
   slug: 'differences',
@@ -22,49 +24,69 @@ export const differences: Rule = {
   *check(context) {
     if (!context.earlierRows) return;
     const { mostListed } = limitsOf(context, 'V80', LIMITS);
-    const before = numbered(context.earlierRows);
-    const now = numbered(context.rows);
-    let changes = 0;
-    for (const [key, row] of now) {
-      const earlier = before.get(key);
-      if (!earlier) continue;
-      for (const field of COMPARED) {
-        if (row[field] === earlier[field]) continue;
-        changes += 1;
-        if (changes > mostListed) continue;
-        yield {
-          ...placeOf(context, row, field),
-          message: `In row ${row.row}, ${field} was ${valueText(earlier[field])} before and is ${valueText(row[field])} now.`,
-          remedy: 'Nothing to do if the change is meant.',
-          remedyKind: 'none',
-        };
-      }
-    }
-    const added = [...now.keys()].filter((key) => !before.has(key)).length;
-    const gone = [...before.keys()].filter((key) => !now.has(key)).length;
-    if (changes + added + gone === 0) return;
+    const { both, added, gone } = pairRows(context.earlierRows, context.rows);
+    const changes = both.flatMap(({ before, now }) => changedCells(context, before, now));
+    const listed = [...changes, ...added.map((row) => cameHit(context, row)), ...gone.map(goneHit)];
+    if (listed.length === 0) return;
+    yield* listed.slice(0, mostListed);
+    const rest = listed.length - mostListed;
     yield {
       ...filePlace(),
-      message: `Against the upload before, ${counted(changes, 'value')} changed, ${counted(added, 'row')} came and ${counted(gone, 'row')} went.`,
+      message: `Against the upload before, ${counted(changes.length, 'cell')} changed, ${counted(added.length, 'row')} came and ${counted(gone.length, 'row')} went${rest > 0 ? `; the first ${mostListed} are listed` : ''}.`,
       remedy: 'Nothing to do if the changes are meant.',
       remedyKind: 'none',
     };
   },
 };
 
-const valueText = (value: number | null): string => (value === null ? 'empty' : shown(value));
+function changedCells(context: VettingContext, before: SampleRow, now: SampleRow): RuleHit[] {
+  const fields = new Set([...Object.keys(now.cells), ...Object.keys(before.cells)]);
+  return [...fields].flatMap((field): RuleHit[] => {
+    const [earlier, present] = [said(before.cells[field]), said(now.cells[field])];
+    if (earlier === present) return [];
+    return [
+      {
+        ...placeOf(context, now, field),
+        message: `In row ${now.row}, ${field} was ${earlier} before (row ${before.row}) and is ${present} now.`,
+        remedy: 'Nothing to do if the change is meant.',
+        remedyKind: 'none',
+      },
+    ];
+  });
+}
 
-/** Rows by site, quantity, size cut-off, age and depth; a repeated sample gets a running number. */
-function numbered(rows: readonly SampleRow[]): Map<string, SampleRow> {
-  const found = new Map<string, SampleRow>();
-  const times = new Map<string, number>();
-  for (const row of rows) {
-    const key = [siteKey(row.site ?? ''), row.quantity, row.sizeCutoff, ageOf(row), depthOf(row)].join(
-      '\u0000',
-    );
-    const time = (times.get(key) ?? 0) + 1;
-    times.set(key, time);
-    found.set(`${key}\u0000${time}`, row);
-  }
-  return found;
+/** What a cell says to a reader: its value in canonical units, a limit, or why there is none. */
+function said(traced: TracedValue | undefined): string {
+  if (!traced || (traced.value === null && traced.raw === '')) return 'empty';
+  if (traced.belowDetection) return `below ${traced.value ?? 'detection'}`;
+  if (traced.value === null) return `"${traced.raw.slice(0, 60)}" (no value)`;
+  return typeof traced.value === 'number' ? number(traced.value) : `"${traced.value.slice(0, 60)}"`;
+}
+
+/** All figures where four would hide the change. */
+const number = (value: number): string => String(Number(value.toPrecision(9)));
+
+function cameHit(context: VettingContext, row: SampleRow): RuleHit {
+  return {
+    ...placeOf(context, row, 'site'),
+    subject: 'row-came',
+    message: `Row ${row.row} (${nameOf(row)}) was not in the upload before.`,
+    remedy: 'Nothing to do if the row is meant.',
+    remedyKind: 'none',
+  };
+}
+
+function goneHit(row: SampleRow): RuleHit {
+  return {
+    ...filePlace(),
+    subject: `row-gone ${row.sheet} ${row.row}`.slice(0, 100),
+    message: `Row ${row.row} of sheet "${row.sheet}" before (${nameOf(row)}) is no longer there.`,
+    remedy: 'Nothing to do if the row was meant to go.',
+    remedyKind: 'none',
+  };
+}
+
+function nameOf(row: SampleRow): string {
+  const age = ageOf(row);
+  return `${row.site ?? 'no site'}, ${age === null ? 'no age' : `${shown(age)} ka BP`}, ${row.quantity}`;
 }

@@ -117,7 +117,7 @@ export function mieInto(
   const area = x * x;
   out[Q_SCA] = (2 * scattered) / area;
   out[Q_ABS] = (2 * taken) / area;
-  out[Q_EXT] = out[Q_SCA]! + out[Q_ABS]!;
+  out[Q_EXT] = out[Q_SCA] + out[Q_ABS];
   out[Q_BACK] = (backRe * backRe + backIm * backIm) / area;
   out[G_Q_SCA] = (4 * forward) / area;
   return out;

@@ -1,7 +1,7 @@
 import { DomainError, requireWithin } from '../physical/domain-error';
 import { massFractionBelow, radiusMoment, requireMode, type LognormalMode } from './lognormal-mode';
 import { requireIndex, type RefractiveIndex } from './mie';
-import { PRECISIONS, scatterMode, type ModeScattering, type Precision } from './mode-scattering';
+import { pointsFor, scatterMode, type ModeScattering, type Precision } from './mode-scattering';
 
 /** One mode of an external mixture: its own size, density and index. */
 export interface OpticalMode extends LognormalMode {
@@ -108,7 +108,7 @@ export function requireModes(modes: readonly OpticalMode[]): void {
     requireWithin(`${prefix}densityGCm3`, mode.densityGCm3, 'g cm⁻³', ...DENSITY_RANGE_G_CM3);
     requireIndex(mode.refractiveIndex, `${prefix}refractiveIndex.`);
   });
-  if (modes.every((mode) => mode.numberFraction === 0)) {
+  if (modes.every((mode: OpticalMode) => mode.numberFraction === 0)) {
     throw new DomainError('outside-range', {
       field: 'modes[0].numberFraction',
       value: 0,
@@ -135,7 +135,7 @@ function scatteringOf(mode: OpticalMode, wavelengthUm: number, precision: Precis
   ].join(' ');
   const found = known.get(key);
   if (found) return found;
-  const made = scatterMode(mode, refractiveIndex, wavelengthUm, PRECISIONS[precision].points);
+  const made = scatterMode(mode, refractiveIndex, wavelengthUm, pointsFor(precision, refractiveIndex));
   if (known.size >= KNOWN_LIMIT) known.delete(known.keys().next().value!); // the oldest
   known.set(key, made);
   return made;

@@ -3,7 +3,7 @@ import { Figure } from '../../shared/figure/figure';
 import { useWidth } from '../../shared/figure/use-width';
 import { formatAge, formatNumber } from '../../shared/number/format';
 import type { DataColumn } from '../../shared/table/column';
-import { SitesMap } from './sites-map';
+import { poleOf, SitesMap } from './sites-map';
 
 type Site = DatasetVersionDetail['sites'][number];
 type Props = { sites: readonly Site[]; selected: string; onSelect: (site: string) => void };
@@ -38,7 +38,9 @@ const columns: DataColumn<Site>[] = [
 /** Map and list of the sites in step; picking one filters the plot and the samples. */
 export function SitesFigure({ sites, selected, onSelect }: Props) {
   const [box, width] = useWidth(548);
-  const mapPx = width < 440 ? Math.min(width, 300) : Math.min(286, Math.floor(width * 0.52));
+  const polar = poleOf(sites) !== null;
+  const stacked = width < 440 || !polar; // the whole Earth wants the width, a polar cap leaves room beside it
+  const mapPx = polar ? Math.min(286, stacked ? width : Math.floor(width * 0.52)) : width;
   const oldest = Math.max(1, ...sites.map((site) => site.oldestKaBp ?? 0));
   return (
     <Figure
@@ -47,7 +49,7 @@ export function SitesFigure({ sites, selected, onSelect }: Props) {
       summary={`${sites.length} sites, the oldest sample at ${formatAge(oldest)} ka before 1950.`}
       table={{ columns, rows: sites, rowKey: (site) => site.site }}
     >
-      <div ref={box} className={width < 440 ? 'sites stacked' : 'sites'}>
+      <div ref={box} className={stacked ? 'sites stacked' : 'sites'}>
         <SitesMap sites={sites} selected={selected} widthPx={mapPx} onSelect={onSelect} />
         <div className="sites-list" tabIndex={0} role="region" aria-label="List of sites">
           <table className="sl-table" aria-label="Sites and their reach">

@@ -28,7 +28,6 @@ export function FactsLine({ detail, sheet }: { detail: SubmissionDetail; sheet: 
         </a>
         {workbook.encoding && <span className="sl-muted"> {workbook.encoding}</span>}
       </span>
-      {workbook.sheets.length > 1 && <span>sheet “{sheet}”</span>}
       {table ? (
         <span>
           {table.headerRows.length > 0 ? `header in ${rowsText(table.headerRows)}` : 'no header'}
@@ -68,12 +67,19 @@ function UnitFact({ kind, columns }: { kind: DatasetKind; columns: Columns }) {
       {declared.title.toLowerCase()} in <Unit of={conversion.canonical} />
       {conversion.factor !== 1 && (
         <>
-          , 1 <Unit of={column.unit} /> = <Digits value={conversion.factor} figures={4} /> of it
+          , 1 <Unit of={column.unit} /> ={' '}
+          <Digits value={conversion.factor} decimals={decimalsShown(conversion.factor)} /> of it
         </>
       )}
     </span>
   );
 }
+
+/** As many decimals as the factor has, four figures at most. */
+const decimalsShown = (factor: number) => {
+  const text = String(Number(factor.toPrecision(4)));
+  return text.includes('e') ? undefined : (text.split('.')[1]?.length ?? 0);
+};
 
 const Key = () => (
   <span className="facts-key" aria-hidden="true">

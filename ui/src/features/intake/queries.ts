@@ -90,7 +90,7 @@ export const rulesQuery = queryOptions({
 
 /** Datasets of which an approval can become a new version. */
 export const datasetChoicesQuery = queryOptions({
-  queryKey: ['datasets', 'list'],
+  queryKey: ['datasets', 'choices'],
   queryFn: () => listOf(api.get<Listed<{ slug: string; title: string; kind: string }>>('/datasets')),
 });
 

@@ -37,7 +37,12 @@ export function gridColumns(
       unit: column?.unit ?? null,
       canonicalUnit: field?.canonicalUnit ?? '',
       numeric: field !== undefined && field.quantity !== 'text',
-      widthPx: widthOf(column?.heading ?? '', field?.title, narrow),
+      widthPx: widthOf(
+        column?.heading ?? '',
+        field?.title,
+        unitsText(column?.unit, field?.canonicalUnit),
+        narrow,
+      ),
     };
   });
   const first = narrow ? [...FIRST_ON_NARROW, declared.valueField] : [];
@@ -51,8 +56,17 @@ export function gridColumns(
     .map(({ column: { field: _, ...column } }) => column);
 }
 
-function widthOf(heading: string, title: string | undefined, narrow: boolean): number {
-  if (title === undefined) return narrow ? 84 : Math.min(140, Math.max(84, heading.length * 6 + 20));
-  const wanted = Math.max(title.length * 7 + 20, Math.min(heading.length, 16) * 6 + 60);
-  return Math.min(narrow ? 128 : 190, Math.max(96, wanted));
+const unitsText = (unit: string | null | undefined, canonical = '') =>
+  !unit || unit === canonical ? canonical : `${unit} to ${canonical}`;
+
+const CHAR_PX = 5.7;
+const AIR_PX = 26;
+
+/** Wide enough for the title and, as far as that is short, for heading and units beneath it. */
+function widthOf(heading: string, title: string | undefined, units: string, narrow: boolean): number {
+  if (title === undefined)
+    return narrow ? 84 : Math.min(140, Math.max(84, heading.length * CHAR_PX + AIR_PX));
+  const beneath = (heading.length + units.length + 3) * CHAR_PX + AIR_PX;
+  const wanted = Math.max(title.length * 7 + 20, Math.min(beneath, 210));
+  return Math.round(Math.min(narrow ? 128 : 210, Math.max(88, wanted)));
 }

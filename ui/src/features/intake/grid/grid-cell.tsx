@@ -1,7 +1,7 @@
 import { ArrowUndo16Regular, Comment16Filled } from '@fluentui/react-icons';
 import { memo } from 'react';
 import { formatNumber } from '../../../shared/number/format';
-import { CellEditor } from './cell-editor';
+import { CellEditor, type EditorMove } from './cell-editor';
 import type { GridColumn } from './columns';
 import { cellId, type GridRow } from './grid-model';
 import type { CellMark } from './marks';
@@ -23,10 +23,12 @@ export type GridCellProps = {
   inRange: boolean;
   /** text in the editor, null while the cell is only shown */
   draft: string | null;
+  /** the text was proposed, not typed */
+  tentative: boolean;
   mayEdit: boolean;
   onPick: (row: number, at: number, extend: boolean) => void;
   onEdit: () => void;
-  onDone: (text: string | null, move: 'down' | 'right' | 'stay') => void;
+  onDone: (text: string | null, move: EditorMove) => void;
   onUndo: (correctionId: string) => void;
   onOpenQuery: (column: string, row: number) => void;
 };
@@ -107,8 +109,11 @@ function Normalised({ cell, numeric }: { cell: Cell | undefined; numeric: boolea
 /** Four figures say enough under a raw cell; the whole number stands in the line beneath the grid. */
 export function shownValue(value: string | number, numeric: boolean): string {
   if (typeof value !== 'number') return value;
-  if (!numeric || Number.isInteger(value)) return formatNumber(value, { decimals: 0 });
-  const size = Math.abs(value);
-  if (size < 1e-4) return value.toExponential(2).replace(/-/g, '\u2212');
-  return formatNumber(value, { figures: size >= 1000 ? 6 : 4 });
+  if (!numeric) return formatNumber(value, { decimals: decimalsOf(value) });
+  if (Math.abs(value) < 1e-4 && value !== 0) return value.toExponential(2).replace(/-/g, '\u2212');
+  const short = Number(value.toPrecision(Math.abs(value) >= 1000 ? 6 : 4));
+  return formatNumber(short, { decimals: decimalsOf(short) });
 }
+
+const decimalsOf = (value: number) =>
+  Math.min(8, String(value).split('.')[1]?.replace(/e.*$/, '').length ?? 0);

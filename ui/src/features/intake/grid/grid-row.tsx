@@ -12,7 +12,7 @@ type Props = GridModel &
     items: VirtualItem[];
     cursor: Cursor;
     range: Range;
-    draft: (Cursor & { text: string }) | null;
+    draft: (Cursor & { text: string; tentative: boolean }) | null;
     onEdit: () => void;
     onPickRow: (row: number, target: HTMLElement) => void;
   };
@@ -63,6 +63,7 @@ export function GridRowView(props: Props) {
             isCursor={isCursor}
             inRange={!isCursor && isInRange(range, row, index)}
             draft={props.draft?.row === row && props.draft.columnAt === index ? props.draft.text : null}
+            tentative={props.draft?.tentative ?? false}
             mayEdit={props.mayEdit}
             onPick={props.onPick}
             onEdit={props.onEdit}

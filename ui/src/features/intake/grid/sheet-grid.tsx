@@ -1,5 +1,6 @@
 import { defaultRangeExtractor, useVirtualizer } from '@tanstack/react-virtual';
 import { useCallback, useEffect, useRef, useState } from 'react';
+import type { EditorMove } from './cell-editor';
 import type { GridCommand } from './grid-command';
 import { GridHead } from './grid-head';
 import { cellId, HEAD_PX, ROW_HEAD_PX, ROW_PX, textOf, type GridModel } from './grid-model';
@@ -65,7 +66,8 @@ export function SheetGrid(props: Props) {
     reveal(to);
   };
   const isOpen = mayEdit && kindOf(cursor.row) === 'data' && props.rowAt(cursor.row) !== undefined;
-  const edit = (text: string | null) => setDraft(isOpen && text !== null ? { ...cursor, text } : null);
+  const edit = (text: string | null) =>
+    setDraft(isOpen && text !== null ? { ...cursor, text, tentative: false } : null);
 
   useEffect(() => {
     if (!command) return;
@@ -78,19 +80,19 @@ export function SheetGrid(props: Props) {
   }, [command]);
   useEffect(() => {
     if (proposed === null || !isOpen) return; // the row may still be on its way
-    setDraft({ ...cursor, text: proposed });
+    setDraft({ ...cursor, text: proposed, tentative: true });
     setProposed(null);
     // eslint-disable-next-line react-hooks/exhaustive-deps
   }, [proposed, isOpen]);
 
-  const done = (text: string | null, move: 'down' | 'right' | 'stay') => {
+  const done = (text: string | null, move: EditorMove) => {
     if (!draft) return;
     setDraft(null);
     const { row, columnAt } = draft;
     const column = columns[columnAt]?.letter;
     if (text !== null && column && text !== textOf(props.rowAt(row), column))
       props.onMend([{ row, column, text }]);
-    if (move === 'stay' && text !== null) return; // the focus went elsewhere
+    if (move === 'away') return;
     grid.current?.focus({ preventScroll: true });
     if (move === 'down') goTo({ columnAt, row: Math.min(rowCount, row + 1) }, false);
     if (move === 'right') goTo({ row, columnAt: Math.min(columns.length - 1, columnAt + 1) }, false);
@@ -154,7 +156,7 @@ export function SheetGrid(props: Props) {
   );
 }
 
-type Draft = Cursor & { text: string };
+type Draft = Cursor & { text: string; tentative: boolean };
 
 /** The picked cell and the one being typed in stay drawn, wherever the sheet is scrolled to. */
 const withKept = (inSight: number[], kept: number[]) =>

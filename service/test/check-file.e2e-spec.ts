@@ -276,7 +276,7 @@ test('without a file, with two or under another name it is refused and told how'
 });
 
 test('uploads that break off leave no file behind', async () => {
-  const server = service.app.getHttpServer() as http.Server;
+  const server = service.app.getHttpServer();
   if (!server.listening) await new Promise<void>((ready) => server.listen(0, '127.0.0.1', ready));
   const { port } = server.address() as AddressInfo;
   const breakOff = () =>

@@ -62,7 +62,7 @@ export class DatasetsService {
         siblings.filter(({ state }) => state !== 'draft').map((sibling) => this.versionSummary(sibling)),
       ),
       citation: citationOf(content, version),
-      metadata: content.metadata as DatasetVersionDetail['metadata'],
+      metadata: content.metadata,
       grade: content.grade,
       sites: sites.map((site) => ({ ...site, regionName: REGION_NAMES.get(site.regionCode ?? '') ?? null })),
       sampleCount: content.samples.length,

@@ -59,7 +59,7 @@ export class SubmissionViews {
       sameFileAs: await this.sameFile(row, reader),
       workbook: row.workbook,
       mapping: row.mapping,
-      metadata: row.metadata as SubmissionDetail['metadata'],
+      metadata: row.metadata,
       missingMetadata: missing,
       queries: await this.queriesOf(row.id),
       corrections: await this.correctionsOf(row.id),

@@ -17,7 +17,13 @@ const inputs = {
   reference: { ...light, name: 'reference' },
   field: {
     base: coarseBaseField(),
-    regions: ar6Regions().map(({ code }) => ({ code, ...ratio, siteCount: 0, status: 'global', hatched: true })),
+    regions: ar6Regions().map(({ code }) => ({
+      code,
+      ...ratio,
+      siteCount: 0,
+      status: 'global',
+      hatched: true,
+    })),
     global: ratio,
     sharedSe: 0.2,
   },
@@ -51,9 +57,13 @@ const inputs = {
 function agree() {
   const field = sliceField(inputs);
   const { cellAreaFraction, columns } = regularGrid(field.stepDeg);
-  const mean = field.netForcingWm2.reduce((sum, value, cell) => sum + value * cellAreaFraction[Math.floor(cell / columns)], 0);
+  const mean = field.netForcingWm2.reduce(
+    (sum, value, cell) => sum + value * cellAreaFraction[Math.floor(cell / columns)],
+    0,
+  );
   const run = runEstimate(inputs).global.forcing.netWm2.value;
-  if (Math.abs(mean - run) > 1e-9) throw new Error(`The cells give ${mean}, the sums ${run}: nothing was timed.`);
+  if (Math.abs(mean - run) > 1e-9)
+    throw new Error(`The cells give ${mean}, the sums ${run}: nothing was timed.`);
 }
 
 export async function ensembleRows() {

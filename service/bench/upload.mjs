@@ -12,7 +12,10 @@ const ROWS = 100_000;
 export async function uploadRows() {
   const folder = await fs.mkdtemp(path.join(os.tmpdir(), 'siltlight-bench-'));
   const file = path.join(folder, 'large.csv');
-  const lines = Array.from({ length: ROWS }, (_, i) => `Core ${i % 50},-75.1,123.35,${i / 1000},${1 + (i % 7)},0.1,bulk`);
+  const lines = Array.from(
+    { length: ROWS },
+    (_, i) => `Core ${i % 50},-75.1,123.35,${i / 1000},${1 + (i % 7)},0.1,bulk`,
+  );
   await fs.writeFile(file, `site,lat,lon,age ka BP,flux,error,cut-off\n${lines.join('\n')}\n`);
   const delay = monitorEventLoopDelay({ resolution: 5 });
   delay.enable();

@@ -87,9 +87,10 @@ export function sunOfDay(
   const { a, b, h0, sunDistanceAu } = sunCourse(latitudeDeg, solarLongitudeDeg, orbit);
   const { nodes, weights } = gaussLegendre(h0 === 0 ? 1 : DAY_POINTS);
   const normalWm2 = ((solarConstantWm2 / (sunDistanceAu * sunDistanceAu)) * h0) / Math.PI;
-  // A sun that only grazes the horizon is lifted to the lowest angle served; its flux is then next to nothing.
-  const cosines = nodes.map((x) => Math.max(MIN_COS_ZENITH, a + b * Math.cos((h0 * (1 + x)) / 2)));
-  const fluxesWm2 = weights.map((w, i) => normalWm2 * (w / 2) * cosines[i]!);
+  const heights = nodes.map((x) => Math.max(0, a + b * Math.cos((h0 * (1 + x)) / 2)));
+  const fluxesWm2 = weights.map((w, i) => normalWm2 * (w / 2) * heights[i]!);
+  // A sun that only grazes the horizon is seen at the lowest angle served; its flux is next to nothing.
+  const cosines = heights.map((mu) => Math.max(MIN_COS_ZENITH, mu));
   return { cosines, fluxesWm2, hemisphericWm2: 0 };
 }
 

@@ -2,6 +2,7 @@ import { Body, Controller, HttpCode, Post } from '@nestjs/common';
 import { ApiBody, ApiOperation } from '@nestjs/swagger';
 import { calculateColumn, type ColumnRequest } from '@siltlight/common/forcing/column';
 import { calculateForcing, type ForcingRequest } from '@siltlight/common/forcing/calculate-forcing';
+import { calculateLayer, type LayerRequest } from '@siltlight/common/forcing/calculate-layer';
 import { calculateGreenhouse, type GreenhouseRequest } from '@siltlight/common/forcing/greenhouse';
 import {
   calculateHumidityGrowth,
@@ -41,6 +42,14 @@ export class CalculatorsController {
   @ApiOperation({ summary: 'Forcing of one cell by the method named' })
   forcing(@Body() body: PlainObjectDto) {
     return calculateForcing(body as unknown as ForcingRequest);
+  }
+
+  @Post('layer')
+  @HttpCode(200)
+  @ApiBody({ schema: requestSchemas.layer })
+  @ApiOperation({ summary: 'Reflectance, transmittance and absorptance of a layer over its surface' })
+  layer(@Body() body: PlainObjectDto) {
+    return calculateLayer(body as unknown as LayerRequest);
   }
 
   @Post('upscatter')

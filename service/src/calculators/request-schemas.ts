@@ -1,4 +1,7 @@
 import type { ApiBodyOptions } from '@nestjs/swagger';
+import { LAYER_SCHEME_IDS } from '@siltlight/common/forcing/calculate-layer';
+import { FORCING_METHODS } from '@siltlight/common/forcing/methods';
+import { CLOSURE_IDS } from '@siltlight/common/forcing/two-stream-closures';
 
 type SchemaObject = Exclude<Extract<ApiBodyOptions, { schema: unknown }>['schema'], { $ref: string }>;
 
@@ -44,7 +47,7 @@ export const requestSchemas = {
   ),
   forcing: object(
     {
-      method: choice('efficiency', 'simple-albedo', 'thin-layer', 'thin-layer-daily'),
+      method: choice(...Object.keys(FORCING_METHODS)),
       ...numbers('opticalDepth', 'shortwaveEfficiencyWm2', 'longwaveEfficiencyWm2', 'highCloudFraction'),
       efficiencySky: choice('all', 'clear'),
       ...numbers(
@@ -60,14 +63,23 @@ export const requestSchemas = {
         'singleScatteringAlbedo',
         'upscatterFraction',
         'asymmetry',
+        'cosSolarZenith',
         'latitudeDeg',
         'ageKaBp',
       ),
       ...numbers('solarLongitudeDeg'),
+      closure: choice(...CLOSURE_IDS),
       orbit,
       longwave,
     },
     ['method'],
+  ),
+  layer: object(
+    {
+      ...numbers('opticalDepth', 'singleScatteringAlbedo', 'asymmetry', 'cosSolarZenith', 'surfaceAlbedo'),
+      scheme: choice(...LAYER_SCHEME_IDS),
+    },
+    ['opticalDepth', 'singleScatteringAlbedo', 'asymmetry', 'surfaceAlbedo', 'scheme'],
   ),
   upscatter: object(
     { ...numbers('asymmetry', 'cosSolarZenith'), approximation: choice('henyey-greenstein', 'linear') },

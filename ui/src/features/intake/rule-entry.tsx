@@ -5,6 +5,8 @@ import { SeverityIcon, type Severity } from './severity';
 /** "ageStepKa" reads as "age step ka". */
 const limitName = (key: string) => key.replace(/([a-z0-9])([A-Z])/g, '$1 $2').toLowerCase();
 
+const decimalsOf = (value: number) => Math.min(8, String(value).split('.')[1]?.length ?? 0);
+
 /** One rule: what it finds, why that matters, its limits and its source, and whether it runs. */
 export function RuleEntryView({ rule, picked }: { rule: RuleEntry; picked: boolean }) {
   const limits = Object.entries(rule.limits);
@@ -26,8 +28,7 @@ export function RuleEntryView({ rule, picked }: { rule: RuleEntry; picked: boole
             Limits:{' '}
             {limits
               .map(
-                ([key, value]) =>
-                  `${limitName(key)} ${formatNumber(value, { decimals: Number.isInteger(value) ? 0 : undefined })}`,
+                ([key, value]) => `${limitName(key)} ${formatNumber(value, { decimals: decimalsOf(value) })}`,
               )
               .join(', ')}
           </p>

@@ -15,7 +15,7 @@ export const estimateRequest = z
     transmittance: z.number().min(0.3).max(1),
     longwave: z.object({ on: z.boolean(), efficiencyWm2: z.number().min(-20).max(60) }),
     /** shortwave efficiency [W m-2 per unit optical depth], used by the method "efficiency" alone */
-    shortwaveEfficiencyWm2: z.number().min(-200).max(200).optional(),
+    shortwaveEfficiencyWm2: z.number().min(-150).max(150).optional(),
     members: z.number().int().min(64).max(4096),
     seed: z.number().int().min(0).max(4_294_967_295),
   })

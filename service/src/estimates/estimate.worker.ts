@@ -1,6 +1,23 @@
-import { parentPort, workerData } from 'node:worker_threads';
+import { parentPort } from 'node:worker_threads';
 import type { EstimateInputs } from '@siltlight/common/estimate/estimate-inputs';
+import type { EstimateResult } from '@siltlight/common/estimate/estimate-result';
 import { runEstimate } from '@siltlight/common/estimate/run-estimate';
+import { DomainError, type DomainErrorDetails } from '@siltlight/common/physical/domain-error';
 
-/** One estimate on a thread of its own, so that the server answers meanwhile. */
-parentPort!.postMessage(runEstimate(workerData as EstimateInputs));
+/** Errors lose their class on the way between threads; a refusal goes as data, so that it stays one. */
+export type ComputingAnswer =
+  { result: EstimateResult } | { refused: { code: string; details: DomainErrorDetails; message: string } };
+
+function answerTo(inputs: EstimateInputs): ComputingAnswer {
+  try {
+    return { result: runEstimate(inputs) };
+  } catch (error) {
+    if (!(error instanceof DomainError)) throw error;
+    const { code, field, value, unit, allowed, remedy, message } = error;
+    const details = { field, value, unit, allowed, ...(remedy === undefined ? {} : { remedy }) };
+    return { refused: { code, details, message } };
+  }
+}
+
+/** Estimates one after the other on a thread of its own, so that the server answers meanwhile. */
+parentPort!.on('message', (inputs: EstimateInputs) => parentPort!.postMessage(answerTo(inputs)));

@@ -140,7 +140,7 @@ function shortwaveEfficiency({
       pointer: '/shortwaveEfficiencyWm2',
       field: 'shortwaveEfficiencyWm2',
       unit: 'W m⁻² per unit optical depth',
-      allowed: [-200, 200],
+      allowed: [-150, 150],
       message,
     },
   ]);

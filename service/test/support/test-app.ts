@@ -8,6 +8,7 @@ import { readSettings } from '../../src/config/read-settings';
 import type { Settings } from '../../src/config/settings';
 import { SeedRegistry } from '../../src/database/seed-registry';
 import type { LogLine } from '../../src/http/json-log';
+import { copySeededData } from './seeded-data';
 
 export interface TestApp {
   app: NestExpressApplication;
@@ -43,6 +44,8 @@ export async function testApp(options: TestAppOptions = {}): Promise<TestApp> {
     ...options.variables,
   });
   Object.assign(settings, { log: (line: LogLine) => logged.push(line) }, options.settings);
+  const usual = !options.variables && !options.settings && !options.dataDir;
+  if (options.seeded && usual) await copySeededData(dataDir, seed);
   const app = await createApp(settings);
   if (options.seeded) await app.get(SeedRegistry).run();
   const server = app.getHttpServer() as Parameters<typeof request.agent>[0];
@@ -57,4 +60,10 @@ export async function testApp(options: TestAppOptions = {}): Promise<TestApp> {
       if (!options.dataDir) await fs.rm(dataDir, { recursive: true, force: true });
     },
   };
+}
+
+async function seed(dataDir: string): Promise<void> {
+  await fs.mkdir(dataDir);
+  const service = await testApp({ seeded: true, dataDir });
+  await service.close();
 }

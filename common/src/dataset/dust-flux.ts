@@ -10,6 +10,8 @@ export const dustFlux: DatasetKind = {
   title: 'Dust deposition flux',
   valueField: 'fluxGM2Yr',
   sigmaField: 'fluxSigmaGM2Yr',
+  sigmas: { ageKaBp: 'ageSigmaKa' },
+  usableWith: [['concentrationNgG'], ['densityGCm3', 'sedimentationRateCmKyr']],
   fields: [
     ...PLACE_FIELDS,
     {

@@ -1,7 +1,16 @@
 import type { UnitKind } from '../units/convert';
 
 /** What a field holds: a kind of quantity with a unit, or one of those that have a reader of their own. */
-export type FieldQuantity = UnitKind | 'age' | 'latitude' | 'longitude' | 'count' | 'text';
+export type FieldQuantity =
+  | UnitKind
+  | 'age'
+  | 'latitude'
+  | 'longitude'
+  | 'month'
+  | 'count'
+  | 'text'
+  /** a number that keeps the unit its column gives: what it is of is told by its heading */
+  | 'asGiven';
 
 /** One field of a dataset kind: the single place that proposal, conversion, checks, forms, templates and exports read. */
 export interface FieldDeclaration {
@@ -30,6 +39,10 @@ export interface DatasetKind {
   /** one standard error of the value field */
   sigmaField: string;
   fields: FieldDeclaration[];
+  /** uncertainty fields of values other than `valueField`, by the field they belong to */
+  sigmas?: Record<string, string>;
+  /** sets of fields that make a table worth reading though it has no column of `valueField` */
+  usableWith?: string[][];
 }
 
 /** @returns the declaration, or undefined when the kind has no such field */

@@ -1,6 +1,7 @@
 import { columnLetter } from './grid';
 import type { ColumnProposal, Mapping, TableConstant, TableProposal } from './mapping';
 import type { RowSpan } from './positions';
+import type { SiteBlock } from './site-blocks';
 import type { Claim } from './claim';
 
 /** A table on its way to the proposal. */
@@ -12,6 +13,8 @@ export interface Draft {
   span: RowSpan | null;
   /** rows above the first table of the sheet, for a later one */
   general: RowSpan | null;
+  /** what stands over its block of columns, where sites stand side by side */
+  block?: SiteBlock;
 }
 
 /** One list of columns for each sheet; where tables of one sheet differ, each column says to which it belongs. */

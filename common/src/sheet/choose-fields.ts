@@ -67,6 +67,7 @@ function scaleNumber(block: Claim[]): number {
 }
 
 function chooseFluxes(claims: Claim[], kind: DatasetKind): Claim[] {
+  if (kind.valueField !== 'fluxGM2Yr') return claims;
   const values = claims.filter((claim) => claim.field === kind.valueField && claim.quantity !== undefined);
   const dust = values
     .filter((claim) => claim.quantity === 'dust')

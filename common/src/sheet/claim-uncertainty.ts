@@ -5,12 +5,10 @@ import { type Claim, unclaimed } from './claim';
 import type { ColumnHeading } from './column-headings';
 import type { Uncertainty } from './heading';
 
-/** Fields an uncertainty can belong to, and the field of the uncertainty. */
+/** The field of the uncertainty of a field, null where the kind has none. */
 function sigmaFieldOf(field: string | null, kind: DatasetKind): string | null {
   if (field === kind.valueField) return kind.sigmaField;
-  return field === 'ageKaBp' && kind.fields.some((declared) => declared.field === 'ageSigmaKa')
-    ? 'ageSigmaKa'
-    : null;
+  return field === null ? null : (kind.sigmas?.[field] ?? null);
 }
 
 /** Gives an uncertainty to the value it names, else to the value column on its left, with that column's unit if it has none. */

@@ -1,4 +1,5 @@
 import type { DatasetKind } from '../dataset/field';
+import { isRecordKind } from '../dataset/record-kinds';
 import { fluxQuantityOf } from '../dataset/flux-quantity';
 import type { MappedColumn } from './mapped-columns';
 import type { ColumnProposal } from './mapping';
@@ -15,10 +16,12 @@ export interface ColumnGroup {
  */
 export function columnGroups(columns: MappedColumn[], kind: DatasetKind): ColumnGroup[] {
   const of = (field: string): MappedColumn[] => columns.filter((one) => one.reader.field.field === field);
-  const values = of(kind.valueField);
-  const fields = [...new Set(columns.map((one) => one.reader.field.field))].filter(
-    (field) => field !== kind.valueField,
-  );
+  const names = [...new Set(columns.map((one) => one.reader.field.field))];
+  // In a matrix of cloud or temperature the field that stands more than once is the value.
+  const repeated = isRecordKind(kind) ? names.find((field) => of(field).length > 1) : undefined;
+  const valueField = names.includes(kind.valueField) ? kind.valueField : (repeated ?? kind.valueField);
+  const values = of(valueField);
+  const fields = names.filter((field) => field !== valueField);
   if (values.length === 0)
     return [
       {
@@ -40,10 +43,16 @@ export function columnGroups(columns: MappedColumn[], kind: DatasetKind): Column
       return (values.length === 1 ? right.concat(offered) : right).slice(0, 1);
     });
     return {
-      quantity: kind.id === 'dust-flux' ? quantityOf(value.proposal) : kind.valueField,
+      quantity: quantityOfColumn(value.proposal, kind),
       columns: [value, ...others],
     };
   });
+}
+
+function quantityOfColumn(proposal: ColumnProposal, kind: DatasetKind): string {
+  if (kind.id === 'dust-flux') return quantityOf(proposal);
+  const isNamed = kind.fields.some(({ field, quantity }) => field === kind.valueField && quantity === 'asGiven');
+  return isNamed ? (proposal.quantity ?? proposal.heading) : kind.valueField;
 }
 
 const quantityOf = (proposal: ColumnProposal): string =>

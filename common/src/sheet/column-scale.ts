@@ -27,8 +27,10 @@ export interface ColumnSource {
 export function scaleOf({ field, heading, unit, divisor, ageDatum }: ColumnSource): ColumnScale {
   const halved = divisor === 1 ? '' : ` ÷ ${divisor}`;
   const { quantity } = field;
-  if (quantity === 'text' || quantity === 'count')
+  if (quantity === 'text' || quantity === 'count' || quantity === 'month')
     return { factor: 1, offset: 0, rule: 'as given', notes: [] };
+  if (quantity === 'asGiven')
+    return { factor: 1 / divisor, offset: 0, rule: `as given${unit === null ? '' : `, in ${unit}`}${halved}`, notes: [] };
   if (quantity === 'latitude' || quantity === 'longitude')
     return { factor: 1, offset: 0, rule: 'decimal degrees', notes: [] };
   if (quantity === 'age') return ageScale(unit, heading, ageDatum);
@@ -37,7 +39,7 @@ export function scaleOf({ field, heading, unit, divisor, ageDatum }: ColumnSourc
   const age = quantity === 'duration' ? parseAgeUnit(wanted) : null;
   const conversion =
     age && !isUnitProblem(age)
-      ? { factor: age.years / 1e3, explanation: `${age.text} × ${age.years / 1e3} = ka`, assumptions: [] }
+      ? { factor: age.years / 1e3, offset: 0, explanation: `${age.text} × ${age.years / 1e3} = ka`, assumptions: [] }
       : convertTo(quantity, wanted);
   if (isUnitProblem(conversion))
     return { factor: 1, offset: 0, rule: 'unit not understood', problem: conversion, notes: [] };
@@ -47,7 +49,7 @@ export function scaleOf({ field, heading, unit, divisor, ageDatum }: ColumnSourc
   }));
   return {
     factor: conversion.factor / divisor,
-    offset: 0,
+    offset: conversion.offset,
     rule: `${conversion.explanation}${halved}`,
     notes,
   };

@@ -66,7 +66,9 @@ export function mappedColumns(
     const unit =
       proposal.unit ?? (field.field === kind.sigmaField ? ownerUnit(proposal, wanted, kind) : null);
     const divisor =
-      uncertainty && [kind.sigmaField, 'ageSigmaKa'].includes(field.field) ? uncertainty.sigmas : 1;
+      uncertainty && [kind.sigmaField, ...Object.values(kind.sigmas ?? {})].includes(field.field)
+        ? uncertainty.sigmas
+        : 1;
     const reader = columnReader({ field, heading: proposal.heading, unit, divisor, ...options }, format, own);
     const column = { index: columnIndex(proposal.column), letter: proposal.column, proposal, reader };
     notes.push(...notesOf(column, sheet.name, own.length > 0, uncertainty?.deviation ?? false));

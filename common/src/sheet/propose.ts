@@ -1,17 +1,23 @@
 import type { DatasetKind } from '../dataset/field';
+import { isRecordKind } from '../dataset/record-kinds';
 import { missingCodeOf } from '../units/missing-code';
 import { chooseFields } from './choose-fields';
 import { columnHeadings } from './column-headings';
+import { withColumnNotes } from './column-notes';
+import { datumInProse, withProseDatum } from './datum-in-prose';
 import { findTables, type FoundTable } from './find-tables';
 import { columnLetter, type RawSheet, type RawWorkbook } from './grid';
 import { assembleMapping, type Draft } from './assemble-mapping';
 import type { Mapping, TableProposal } from './mapping';
-import { positionInNotes } from './positions';
+import { claimGridMatrix, claimMonthMatrix, gridMatrix } from './matrix';
+import { positionInNotes, type RowSpan } from './positions';
 import type { Claim } from './claim';
 import { recogniseColumns } from './recognise-columns';
 import { isFilled, isNumberLike } from './row-kind';
 import { type PassOverNote, passOverNotes, reasonToSetAside } from './set-aside';
+import { claimsOfBlock, siteBlocks, withoutTitles } from './site-blocks';
 import { tableConstants } from './table-constants';
+import { findTurned, turnedTable } from './turned';
 
 /** A sheet with more is a report, not data. */
 const MOST_TABLES = 60;
@@ -29,8 +35,9 @@ export function proposeWorkbook(workbook: RawWorkbook, kind: DatasetKind): Mappi
   const found = new Map(workbook.sheets.map((sheet) => [sheet, findTables(sheet)]));
   const notesPosition = positionInNotes(workbook, (sheet) => (found.get(sheet) ?? []).length === 0);
   const notes = passOverNotes(workbook);
+  const notesSheets = workbook.sheets.filter((sheet) => (found.get(sheet) ?? []).length === 0);
   const drafts = workbook.sheets.flatMap((sheet) =>
-    draftsOf(sheet, found.get(sheet) ?? [], { workbook, kind, notes }),
+    draftsOf(sheet, found.get(sheet) ?? [], { workbook, kind, notes, notesSheets }),
   );
   for (const draft of drafts) {
     if (draft.table.used) draft.constants = tableConstants(draft, workbook, kind, notesPosition);
@@ -42,9 +49,13 @@ interface FileAtHand {
   workbook: RawWorkbook;
   kind: DatasetKind;
   notes: PassOverNote[];
+  /** sheets without a table: what they say holds for the others */
+  notesSheets: RawSheet[];
 }
 
 function draftsOf(sheet: RawSheet, tables: FoundTable[], file: FileAtHand): Draft[] {
+  const turned = findTurned(sheet, file.kind);
+  if (turned) return [turnedDraft(sheet, turned, file)];
   if (tables.length === 0)
     return [{ table: notesOnly(sheet), claims: [], constants: [], span: null, general: null }];
   const drafts: Draft[] = [];
@@ -57,11 +68,11 @@ function draftsOf(sheet: RawSheet, tables: FoundTable[], file: FileAtHand): Draf
     const general = drafts[0]?.span ?? null;
     const continues =
       found.headerRows.length === 0 && headed !== undefined && headed.table.headerRows.length > 0;
-    drafts.push(
-      continues
-        ? { ...headed, table: continued(sheet, found, headed.table) }
-        : { ...draftOf(sheet, found, file), span, general },
-    );
+    if (continues) drafts.push({ ...headed, table: continued(sheet, found, headed.table) });
+    else
+      drafts.push(
+        ...draftsOfTable(sheet, found, span, file).map((draft) => ({ span, general, constants: [], ...draft })),
+      );
   }
   const beyond = tables[MOST_TABLES];
   if (beyond)
@@ -100,23 +111,56 @@ function notesOnly(sheet: RawSheet): TableProposal {
   };
 }
 
-function draftOf(sheet: RawSheet, found: FoundTable, { workbook, kind, notes }: FileAtHand): Draft {
-  const firstHeaderRow = found.headerRows[0] ?? found.firstRow;
-  const claims = chooseFields(
-    recogniseColumns(columnHeadings(sheet, found), kind, (index) => numberShare(sheet, found, index)),
-    kind,
-    sheet,
-    firstHeaderRow,
-  );
+type TableDraft = Pick<Draft, 'table' | 'claims' | 'block'>;
+
+/** One draft of a table; of sites that stand side by side one each, with the same rows. */
+function draftsOfTable(sheet: RawSheet, found: FoundTable, span: RowSpan, file: FileAtHand): TableDraft[] {
+  const below = withoutTitles(sheet, found) ?? found;
+  const wide = { ...span, before: below.headerRows[0] ?? below.firstRow };
+  const claims = claimsOf(sheet, below, wide, file);
+  const blocks = siteBlocks(claims, sheet, wide, file.kind);
+  if (!blocks) return [draftOf(sheet, found, span, file)];
+  return blocks.map((block) => {
+    const own = claimsOfBlock(claims, block);
+    const draft = settled(sheet, below, own, file);
+    const columns = `${columnLetter(block.first)}–${columnLetter(block.last)}`;
+    const reason = `${draft.table.reason} One of ${blocks.length} tables side by side: columns ${columns}.`;
+    return { ...draft, table: { ...draft.table, reason }, block };
+  });
+}
+
+function draftOf(sheet: RawSheet, found: FoundTable, span: RowSpan, file: FileAtHand): TableDraft {
+  const matrix = gridMatrix(sheet, found, file.kind);
+  if (!matrix) return settled(sheet, found, claimsOf(sheet, found, span, file), file);
+  const claims = claimGridMatrix(columnHeadings(sheet, matrix), sheet, matrix);
+  const reason = `Matrix: ${reasonUsed(matrix, [], file.kind)}`;
+  return { table: { ...matrix, sheet: sheet.name, used: true, reason }, claims };
+}
+
+/** What the columns of a table are, each by itself: units from the lines above and the datum of the text included. */
+function claimsOf(sheet: RawSheet, found: FoundTable, span: RowSpan, { kind, notesSheets }: FileAtHand): Claim[] {
+  const headings = withColumnNotes(columnHeadings(sheet, found), sheet, span, kind);
+  const claims = recogniseColumns(headings, kind, (index) => numberShare(sheet, found, index));
+  return withProseDatum(claimMonthMatrix(claims, kind, sheet, found), datumInProse(sheet, span, notesSheets));
+}
+
+function settled(sheet: RawSheet, found: FoundTable, own: Claim[], { workbook, kind, notes }: FileAtHand): TableDraft {
+  const claims = chooseFields(own, kind, sheet, found.headerRows[0] ?? found.firstRow);
   const setAside = reasonToSetAside(sheet, workbook, found.firstRow, notes);
   const unusable = setAside ?? reasonNotUsable(claims, found, kind);
-  const table: TableProposal = {
-    ...found,
-    sheet: sheet.name,
-    used: unusable === null,
-    reason: unusable ?? reasonUsed(found, claims, kind),
-  };
-  return { table, claims, constants: [], span: null, general: null };
+  const reason = unusable ?? reasonUsed(found, claims, kind);
+  return { table: { ...found, sheet: sheet.name, used: unusable === null, reason }, claims };
+}
+
+function turnedDraft(sheet: RawSheet, table: TableProposal, file: FileAtHand): Draft {
+  const span = { from: 1, before: table.firstRow };
+  const view = turnedTable(sheet, table, file.kind);
+  if (!view) return { table: notesOnly(sheet), claims: [], constants: [], span: null, general: null };
+  const claims = claimsOf(view.sheet, view.table, { from: 1, before: 1 }, file);
+  const draft = settled(view.sheet, view.table, claims, file);
+  const { used, reason } = draft.table;
+  const said = used ? table.reason : `${table.reason} ${reason}`;
+  return { claims: draft.claims, table: { ...table, used, reason: said }, constants: [], span, general: null };
 }
 
 function numberShare(sheet: RawSheet, { firstRow, lastRow }: FoundTable, index: number): number | undefined {
@@ -130,9 +174,6 @@ function numberShare(sheet: RawSheet, { firstRow, lastRow }: FoundTable, index: 
   return filled === 0 ? undefined : numbers / filled;
 }
 
-/** Fields from which a dust flux can be had where no column gives it. */
-const SUBSTITUTES = [['concentrationNgG'], ['densityGCm3', 'sedimentationRateCmKyr']];
-
 function reasonNotUsable(claims: Claim[], found: FoundTable, kind: DatasetKind): string | null {
   if (found.headerRows.length === 0) return 'It has no header rows, so what its columns hold cannot be told.';
   const fields = new Set(
@@ -141,8 +182,8 @@ function reasonNotUsable(claims: Claim[], found: FoundTable, kind: DatasetKind):
       .map((claim) => claim.field),
   );
   if (fields.has(kind.valueField)) return null;
-  if (kind.id === 'dust-flux' && SUBSTITUTES.some((wanted) => wanted.every((field) => fields.has(field))))
-    return null;
+  const claimed = isRecordKind(kind) ? new Set(claims.map((claim) => claim.field)) : fields;
+  if (kind.usableWith?.some((wanted) => wanted.every((field) => claimed.has(field)))) return null;
   const title =
     kind.fields.find((field) => field.field === kind.valueField)?.title.toLowerCase() ?? kind.valueField;
   const tracers = claims

@@ -3,6 +3,7 @@ import type { TracedValue } from '../dataset/sample-row';
 import { type Axis, foldCoordinate, isCoordinateProblem, parseCoordinate } from '../units/coordinate';
 import { type EastLetter, letterOMeaning } from '../units/hemisphere';
 import { isMissingNumber, missingCodeOf } from '../units/missing-code';
+import { monthOf } from '../units/month';
 import { type NumberReading, readNumber } from '../units/number';
 import { DECIMAL_POINT, type NumberFormat } from '../units/number-format';
 import { type ColumnScale, type ColumnSource, scaleOf } from './column-scale';
@@ -56,6 +57,7 @@ export function readCell(
     return refused(traced, 'error-cell', `"${text}" is an error of the spreadsheet; type the value.`);
   const { quantity } = reader.field;
   if (quantity === 'text') return readText(text, traced);
+  if (quantity === 'month') return readMonth(text, traced);
   if (mended === undefined && cell?.kind === 'date')
     return refused(traced, 'date-cell', `"${text}" is a date where a number is wanted; type the number.`);
   if (quantity === 'latitude' || quantity === 'longitude')
@@ -69,6 +71,13 @@ export function readCell(
   );
 }
 
+/** "0.50 ± 0.04": the second number as a value of its own, the uncertainty of the first. */
+export function spreadOf({ traced, plusMinus }: CellReading): Pick<CellReading, 'value' | 'traced'> {
+  const value = plusMinus ?? null;
+  const spread = { ...traced, value, rule: `behind ± in the same cell; ${traced.rule}` };
+  return { value, traced: spread };
+}
+
 function refused(traced: TracedValue, code: string, message: string): CellReading {
   traced.problem = { code, message };
   return { value: null, traced };
@@ -79,6 +88,16 @@ function readText(text: string, traced: TracedValue): CellReading {
   traced.rule = missing === null ? 'as given' : 'missing code';
   traced.value = missing === null ? text.trim() : null;
   return { value: traced.value, traced };
+}
+
+function readMonth(text: string, traced: TracedValue): CellReading {
+  if (missingCodeOf(text) !== null) return asMissing(text, traced);
+  const month = monthOf(text);
+  if (month === null)
+    return refused(traced, 'no-month', `"${text.trim()}" is no month; 1 to 12, a name or "annual" is wanted.`);
+  traced.rule = month === 'annual' ? 'the mean of the year' : 'number of the month';
+  traced.value = month;
+  return { value: month, traced };
 }
 
 function readPosition(

@@ -1,5 +1,6 @@
 import type { DatasetKind, FieldDeclaration } from '../dataset/field';
 import { fluxQuantityOf } from '../dataset/flux-quantity';
+import { isRecordKind } from '../dataset/record-kinds';
 import { parseAgeUnit } from '../units/age';
 import { convertTo, UNIT_KINDS, type UnitKind } from '../units/convert';
 import { isUnitProblem } from '../units/unit';
@@ -37,13 +38,10 @@ function claimValue(heading: ColumnHeading, kind: DatasetKind, numberShare: Numb
   const share = numberShare(heading.index);
   if (heading.text === '' && heading.unit === null)
     return unclaimed(heading, share === undefined ? 'Empty column.' : 'The column has no heading.');
+  if (isRecordKind(kind)) return claimOfRecord(heading, kind, share);
   const tracer = fluxQuantityOf(heading.text);
   const isTracer = tracer !== null && tracer !== 'dust';
-  const claims = kind.fields
-    .filter((field) => field.field !== kind.sigmaField)
-    .map((field) => ({ field, ...likeness(heading, field, share) }))
-    .filter(({ score }) => score >= 0.3)
-    .sort((a, b) => b.score - a.score);
+  const claims = likely(heading, kind, share);
   if (isTracer) {
     const asTracer = claimTracer(heading, tracer, kind);
     if (asTracer) return asTracer;
@@ -60,6 +58,46 @@ function claimValue(heading: ColumnHeading, kind: DatasetKind, numberShare: Numb
   return best.field.quantity === 'massFlux' && best.field.field === kind.valueField
     ? { ...claim, quantity: tracer ?? 'dust' }
     : claim;
+}
+
+interface Likely {
+  field: FieldDeclaration;
+  score: number;
+  reason: string;
+}
+
+/** Fields that a heading and its unit may mean, best first. Uncertainties are claimed elsewhere. */
+function likely(heading: ColumnHeading, kind: DatasetKind, share: number | undefined): Likely[] {
+  const sigmas = new Set([kind.sigmaField, ...Object.values(kind.sigmas ?? {})]);
+  return kind.fields
+    .filter(({ field }) => !sigmas.has(field) || (field === 'ageSigmaKa' && kind.id === 'age-series'))
+    .map((field) => ({ field, ...likeness(heading, field, share) }))
+    .filter(({ score }) => score >= 0.3)
+    .sort((a, b) => b.score - a.score);
+}
+
+/**
+ * A column of a kind of records. A value that keeps its own unit is named by its heading: known by the whole heading,
+ * or by nothing but having a unit and numbers; a part of a heading without unit is too little.
+ */
+function claimOfRecord(heading: ColumnHeading, kind: DatasetKind, share: number | undefined): Claim {
+  const best = likely(heading, kind, share).find(
+    ({ field, score }) => field.quantity !== 'asGiven' || heading.unit !== null || score >= 0.9,
+  );
+  const value = kind.fields.find(({ field }) => field === kind.valueField);
+  const named = value?.quantity === 'asGiven' ? { quantity: heading.name || heading.text } : {};
+  if (best) {
+    const { field, score, reason } = best;
+    const own = field === value ? named : {};
+    return { heading, field: field.field, confidence: Math.round(score * 100) / 100, reason, ...own };
+  }
+  if (value?.quantity !== 'asGiven' || heading.unit === null || (share ?? 0) < 0.3)
+    return unclaimed(heading, 'No field of this kind is headed so.');
+  const age = parseAgeUnit(heading.unit);
+  if (!isUnitProblem(age) && age.datum !== null && kind.fields.some(({ field }) => field === 'ageKaBp'))
+    return { heading, field: 'ageKaBp', confidence: 0.6, reason: `Only an age has the unit ${heading.unit}.` };
+  const reason = `A column of numbers with the unit ${heading.unit}.`;
+  return { heading, field: value.field, confidence: 0.5, reason, ...named };
 }
 
 /** Of several wavelengths the one with values and nearest to 550 nm is taken, for there optical depths are compared. */
@@ -133,7 +171,7 @@ function unitFit(
   heading: ColumnHeading,
   { quantity, canonicalUnit }: FieldDeclaration,
 ): { weight: number; reason: string } {
-  if (quantity === 'text') return { weight: 1, reason: '' };
+  if (quantity === 'text' || quantity === 'month' || quantity === 'asGiven') return { weight: 1, reason: '' };
   if (quantity === 'count')
     return heading.unit === null
       ? { weight: 1, reason: '' }

@@ -18,7 +18,9 @@ export function tableConstants(
   const sheet = workbook.sheets.find((one) => one.name === draft.table.sheet);
   if (!sheet || !draft.span) return [];
   const mapped = new Set(draft.claims.map((claim) => claim.field));
-  const offered = statedConstants(sheet, draft.span, draft.general, kind);
+  const offered = draft.block
+    ? [...draft.block.constants]
+    : statedConstants(sheet, draft.span, draft.general, kind);
   const has = (field: string): boolean =>
     mapped.has(field) || offered.some((constant) => constant.field === field);
   if (!has('site')) {

@@ -21,7 +21,11 @@ export type UnitKind =
   | 'density'
   | 'sedimentationRate'
   | 'duration'
-  | 'angle';
+  | 'angle'
+  | 'massExtinction'
+  | 'temperature'
+  | 'moleFractionPpm'
+  | 'moleFractionPpb';
 
 interface KindDeclaration {
   canonical: string;
@@ -45,9 +49,13 @@ export const UNIT_KINDS: Record<UnitKind, KindDeclaration> = {
   sedimentationRate: { canonical: 'cm kyr-1', dimension: dimensionOf({ length: 1, time: -1 }), wanted: 'a thickness per time, such as cm kyr-1 or mm/yr' },
   duration: { canonical: 'ka', dimension: dimensionOf({ time: 1 }), wanted: 'a length of time, such as yr, kyr or Ma' },
   angle: { canonical: '°', dimension: dimensionOf({ angle: 1 }), wanted: 'degrees' },
+  massExtinction: { canonical: 'm2 g-1', dimension: dimensionOf({ length: 2, mass: -1 }), wanted: 'an area per mass, such as m2 g-1' },
+  temperature: { canonical: 'K', dimension: dimensionOf({}), wanted: 'K, °C or °F' },
+  moleFractionPpm: { canonical: 'ppm', dimension: dimensionOf({}), wanted: 'a mole fraction, such as ppm, ppb or µmol/mol' },
+  moleFractionPpb: { canonical: 'ppb', dimension: dimensionOf({}), wanted: 'a mole fraction, such as ppb, ppm or nmol/mol' },
 }; // prettier-ignore
 
-/** value in canonical unit = value × factor + offset; `offset` is 0 for every kind here and kept for temperatures. */
+/** value in canonical unit = value × factor + offset; `offset` is 0 for every kind but temperatures. */
 export interface Conversion {
   factor: number;
   offset: number;
@@ -69,7 +77,9 @@ export function convertTo(kind: UnitKind, unitText: string): Conversion | UnitPr
     const equivalent = waterEquivalent(unitText);
     if (equivalent) return equivalent;
   }
-  const readings = bothReadings(unitText);
+  if (kind === 'temperature') return temperature(unitText, wanted);
+  const isMoleFraction = kind === 'moleFractionPpm' || kind === 'moleFractionPpb';
+  const readings = bothReadings(isMoleFraction ? plainMoleFraction(unitText) : unitText);
   const problem = readings.find(isUnitProblem);
   if (problem) return { ...problem, message: `${problem.message.replace(/\.$/, '')}; ${wanted} is wanted.` };
   const units = readings as Unit[];
@@ -140,6 +150,36 @@ function waterEquivalent(unitText: string): Conversion | null {
     explanation: explain(unitText.trim(), factor, 'kg m-2 yr-1', assumptions),
     assumptions,
   };
+}
+
+/** Spellings of kelvin, degrees Celsius and degrees Fahrenheit, with the way to K; 273.15 K is 0 °C by definition. */
+const TEMPERATURES: [RegExp, number, number][] = [
+  [/^(?:K|°K|kelvins?)$/i, 1, 0],
+  [/^(?:°\s?C|deg\.?\s?C|C|celsius|degrees? c(?:elsius)?|grad celsius)$/i, 1, 273.15],
+  [/^(?:°\s?F|deg\.?\s?F|F|fahrenheit|degrees? f(?:ahrenheit)?)$/i, 5 / 9, 273.15 - (32 * 5) / 9],
+];
+
+function temperature(unitText: string, wanted: string): Conversion | UnitProblem {
+  const text = unitText.trim().replace(/[º˚]/gu, '°').replace(/^℃$/u, '°C').replace(/^\[(.*)\]$/, '$1');
+  const found = TEMPERATURES.find(([spelling]) => spelling.test(text));
+  if (!found) {
+    const named = text === '' ? 'No unit is given' : `"${text}" is no unit of a temperature`;
+    const code = text === '' ? 'empty-unit' : 'unknown-unit';
+    return { code, unitText: text, message: `${named}; ${wanted} is wanted.` };
+  }
+  const [, factor, offset] = found;
+  const shift = offset === 0 ? '' : ` + ${Number(offset.toFixed(4))}`;
+  const explanation = factor === 1 && offset === 0 ? 'K, as given' : `${text} × ${Number(factor.toPrecision(7))}${shift} = K`;
+  return { factor, offset, canonical: 'K', explanation, assumptions: [] };
+}
+
+/** "ppmv", "ppm by volume", "µmol/mol", "nmol mol-1" → "ppm", "ppb": in air a fraction of volume is one of molecules. */
+function plainMoleFraction(unitText: string): string {
+  const bare = unitText.trim().replace(/^[[(](.*)[\])]$/, '$1');
+  const parts = /^pp(m|b|t)\s?v?(?:\s*\(?by vol(?:ume|\.)?\)?)?$/i.exec(bare);
+  if (parts) return `pp${parts[1]!.toLowerCase()}`;
+  const moles = /^([µμun])mol\s?(?:\/\s?mol|mol\^?[-−]1|mol⁻¹)$/u.exec(bare);
+  return moles ? (moles[1] === 'n' ? 'ppb' : 'ppm') : unitText;
 }
 
 export { parseUnit };

@@ -1,7 +1,7 @@
 import { expect, test } from 'vitest';
 import { DomainError } from '../physical/domain-error';
 import { requireLimits } from './check-limits';
-import { limitsOf } from './limits';
+import { limitsOf, type RuleLimits, type StewardLimits } from './limits';
 import { rules } from './rules/index';
 import { answers, context, rows } from './rules/rows.test-support';
 import { vet } from './vet';
@@ -34,13 +34,15 @@ test('the defaults of every rule pass as changes for every archive', () => {
   expect(() => requireLimits(limits, rules)).not.toThrow();
 });
 
-test.each([
+const refused: [string, StewardLimits][] = [
   ['no-such-rule', { V99: { all: { factor: 3 } } }],
   ['no-limits', { V03: { all: { factor: 3 } } }],
   ['no-such-limit', { V27: { all: { faktor: 3 } } }],
   ['no-such-limit', { V27: { byArchive: { lake: { min: 3 } } } }],
-  ['no-such-archive', { V27: { byArchive: { coral: { factor: 3 } } } }],
+  ['no-such-archive', { V27: { byArchive: { coral: { factor: 3 } } as RuleLimits['byArchive'] } }],
   ['not-a-number', { V27: { all: { factor: Infinity } } }],
-])('a change that no rule would read is refused as %s', (code, limits) => {
+];
+
+test.each(refused)('a change that no rule would read is refused as %s', (code, limits) => {
   expect(() => requireLimits(limits, rules)).toThrow(expect.objectContaining({ code }) as DomainError);
 });

@@ -41,12 +41,16 @@ export default function Estimate() {
       actions={
         <EstimateActions
           estimate={estimate}
-          exportMenu={mayExport && <ExportMenu estimateId={id} primary={!signOffFirst && state !== 'computed'} />}
+          exportMenu={
+            mayExport && <ExportMenu estimateId={id} primary={!signOffFirst && state !== 'computed'} />
+          }
         />
       }
     >
       {estimate.staleReason && (
-        <p className="sl-13 sl-second">{estimate.staleReason} The numbers below stay as they were computed.</p>
+        <p className="sl-13 sl-second">
+          {estimate.staleReason} The numbers below stay as they were computed.
+        </p>
       )}
       {state === 'computed' && !estimate.rights.maySignOff && estimate.rights.whyNot && (
         <p className="sl-13 sl-second">{estimate.rights.whyNot}</p>

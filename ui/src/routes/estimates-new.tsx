@@ -1,6 +1,12 @@
 import { Button } from '@fluentui/react-components';
 import { Play20Filled } from '@fluentui/react-icons';
-import { useMutation, useQuery, useQueryClient, useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
+import {
+  useMutation,
+  useQuery,
+  useQueryClient,
+  useSuspenseQuery,
+  type QueryClient,
+} from '@tanstack/react-query';
 import { useEffect, useMemo } from 'react';
 import { useNavigate, useSearchParams } from 'react-router-dom';
 import { PreviewPane } from '../features/estimates/preview-pane';
@@ -104,7 +110,9 @@ export default function NewEstimate() {
         <EmptyState title="Estimates are run by scientists.">Those that exist are open to you.</EmptyState>
       ) : (
         <>
-          {run.error && <ErrorState error={run.error} kept="Your set-up is still here." fields={formFields} />}
+          {run.error && (
+            <ErrorState error={run.error} kept="Your set-up is still here." fields={formFields} />
+          )}
           <div className="set-up">
             <SetUpFolds
               {...{ setUp, fields, sets, backdrops }}

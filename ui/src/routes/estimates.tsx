@@ -47,7 +47,11 @@ export default function Estimates() {
       sub={counted(list.data?.pages[0]?.total ?? 0, 'estimate')}
       actions={
         isScientist && (
-          <Button appearance="primary" icon={<Add20Regular />} onClick={() => void navigate('/estimates/new')}>
+          <Button
+            appearance="primary"
+            icon={<Add20Regular />}
+            onClick={() => void navigate('/estimates/new')}
+          >
             New estimate
           </Button>
         )

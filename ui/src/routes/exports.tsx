@@ -18,7 +18,8 @@ export default function Exports() {
   const list = useInfiniteQuery(exportsQuery);
   const files = list.data?.pages.flatMap((page) => page.items) ?? [];
   const slice = params.get('slice');
-  const picked = files.find((file) => file.id === params.get('file')) ?? files.find((file) => file.state === 'done');
+  const picked =
+    files.find((file) => file.id === params.get('file')) ?? files.find((file) => file.state === 'done');
   const waiting = files.filter((file) => file.state === 'queued' || file.state === 'running');
   const select = (id: string) =>
     setParams(
@@ -30,7 +31,11 @@ export default function Exports() {
       { replace: true, preventScrollReset: true },
     );
   return (
-    <Page title="Exports" crumbs={[{ label: 'Exports' }]} sub={slice ? 'of all slices' : 'kept with their checksums'}>
+    <Page
+      title="Exports"
+      crumbs={[{ label: 'Exports' }]}
+      sub={slice ? 'of all slices' : 'kept with their checksums'}
+    >
       <div className="exports">
         {waiting.map((file) => (
           <FileJob key={file.id} jobId={file.jobId} />

@@ -36,8 +36,8 @@ export default function FieldTrace() {
     >
       <div className="trace">
         <p className="sl-13 sl-second">
-          From <Link to={dataset}>{`${trace.datasetTitle}, version ${trace.versionNumber}`}</Link>, file {trace.fileName}{' '}
-          as it was sent. Each cell opens in its sheet.{' '}
+          From <Link to={dataset}>{`${trace.datasetTitle}, version ${trace.versionNumber}`}</Link>, file{' '}
+          {trace.fileName} as it was sent. Each cell opens in its sheet.{' '}
           <span className="sl-muted" title={trace.checksum}>
             SHA-256 {trace.checksum.slice(0, 12)}…
           </span>

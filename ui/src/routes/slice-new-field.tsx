@@ -1,17 +1,18 @@
 import { Button } from '@fluentui/react-components';
 import { Add20Regular } from '@fluentui/react-icons';
-import { useMutation, useQuery, useQueryClient, useSuspenseQuery, type QueryClient } from '@tanstack/react-query';
+import {
+  useMutation,
+  useQuery,
+  useQueryClient,
+  useSuspenseQuery,
+  type QueryClient,
+} from '@tanstack/react-query';
 import { useMemo, useState } from 'react';
 import { useNavigate, useParams, type LoaderFunctionArgs } from 'react-router-dom';
 import { FieldForm } from '../features/fields/field-form';
 import { FieldReport } from '../features/fields/field-report';
 import { fractionsMet } from '../features/fields/field-words';
-import {
-  buildField,
-  datasetsQuery,
-  fieldPreviewQuery,
-  type FieldChoice,
-} from '../features/fields/queries';
+import { buildField, datasetsQuery, fieldPreviewQuery, type FieldChoice } from '../features/fields/queries';
 import { sliceQuery } from '../features/slices/queries';
 import { toApiProblem } from '../shared/api/api-problem';
 import { useHasRole } from '../shared/api/session';
@@ -33,7 +34,10 @@ export default function NewField() {
   const { slug = '' } = useParams();
   const { data: slice } = useSuspenseQuery(sliceQuery(slug));
   const { data: all } = useSuspenseQuery(datasetsQuery);
-  const datasets = useMemo(() => all.filter(({ kind, latest }) => kind === 'dust-flux' && latest.state === 'published'), [all]);
+  const datasets = useMemo(
+    () => all.filter(({ kind, latest }) => kind === 'dust-flux' && latest.state === 'published'),
+    [all],
+  );
   const [choice, setChoice] = useState<FieldChoice>(() => ({
     sliceSlug: slug,
     way: 'regional-scaling',
@@ -93,7 +97,9 @@ export default function NewField() {
           <section
             aria-label="Preview"
             aria-busy={preview.isFetching}
-            className={preview.isFetching || preview.isPlaceholderData ? 'field-preview waiting' : 'field-preview'}
+            className={
+              preview.isFetching || preview.isPlaceholderData ? 'field-preview waiting' : 'field-preview'
+            }
           >
             {preview.error && (
               <ErrorState

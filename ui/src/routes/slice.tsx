@@ -33,7 +33,11 @@ export default function Slice() {
       title={content.name}
       crumbs={[{ label: 'Slices', to: '/slices' }, { label: content.name }]}
       state={<StateTag state={slice.state} />}
-      sub={reference ? `${times}, against ${sliceWithin(reference.name)}` : `${times}, a reference for other slices`}
+      sub={
+        reference
+          ? `${times}, against ${sliceWithin(reference.name)}`
+          : `${times}, a reference for other slices`
+      }
       actions={
         mayBuild && (
           <Button

@@ -13,8 +13,8 @@ export default function Slices() {
   return (
     <Page title="Time slices" crumbs={[{ label: 'Slices' }]} sub="youngest first">
       <p className="slice-times">
-        A slice has two times that are easily taken for one: an evidence window, within which samples of records
-        count, and a single age for orbit and gases.
+        A slice has two times that are easily taken for one: an evidence window, within which samples of
+        records count, and a single age for orbit and gases.
       </p>
       <SlicesTable slices={slices} column={column} />
     </Page>

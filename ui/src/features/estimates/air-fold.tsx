@@ -14,7 +14,8 @@ export function AirFold({ setUp, fields, problem, onChange }: Props) {
   if (fields.length === 0) {
     return (
       <p className="sl-13">
-        No field is built yet. <Link to="/slices">Pick a slice</Link> and build one from the dataset versions in force.
+        No field is built yet. <Link to="/slices">Pick a slice</Link> and build one from the dataset versions
+        in force.
       </p>
     );
   }

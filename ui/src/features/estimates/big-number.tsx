@@ -9,7 +9,8 @@ export function BigNumber({ of }: { of: Interval }) {
   return (
     <p className="big">
       <span className="big-value">{formatNumber(of.value, { decimals: decimalsOf(of), signed: true })}</span>{' '}
-      <ForcingUnit /> <span className="big-range">{range ? `5–95 %: ${range}` : 'nothing varied: no interval'}</span>
+      <ForcingUnit />{' '}
+      <span className="big-range">{range ? `5–95 %: ${range}` : 'nothing varied: no interval'}</span>
     </p>
   );
 }

@@ -7,7 +7,11 @@ import {
   MenuTrigger,
   Tooltip,
 } from '@fluentui/react-components';
-import { CheckmarkCircle20Regular, DocumentText20Regular, MoreHorizontal20Regular } from '@fluentui/react-icons';
+import {
+  CheckmarkCircle20Regular,
+  DocumentText20Regular,
+  MoreHorizontal20Regular,
+} from '@fluentui/react-icons';
 import type { EstimateDetail } from '@siltlight/common/wire/estimates';
 import { useMutation, useQueryClient } from '@tanstack/react-query';
 import { useState, type ReactNode } from 'react';
@@ -113,8 +117,8 @@ function SignOffDialog({ estimate, open, onClose }: DialogProps) {
       onAct={() => act.mutate()}
       onClose={onClose}
     >
-      Your name stands beside {estimate.createdBy.name}’s. The estimate is published and can no longer be changed, only
-      withdrawn with a reason.
+      Your name stands beside {estimate.createdBy.name}’s. The estimate is published and can no longer be
+      changed, only withdrawn with a reason.
     </ConfirmDialog>
   );
 }

@@ -11,7 +11,15 @@ import { inventedEstimate, inventedResult, inventedSite } from './report.test-su
 
 // The drawing needs a canvas, which jsdom lacks: buttons in its place take what the map is told and tell what it would.
 vi.mock('../../shared/map/map-canvas', () => ({
-  default: ({ data, onSelect, onHover }: { data: MapData; onSelect?: (code: string) => void; onHover?: (code: string) => void }) => (
+  default: ({
+    data,
+    onSelect,
+    onHover,
+  }: {
+    data: MapData;
+    onSelect?: (code: string) => void;
+    onHover?: (code: string) => void;
+  }) => (
     <>
       {data.regions.map((region) => (
         <button
@@ -60,7 +68,8 @@ function show(start = '/estimates/e1') {
   return router;
 }
 
-const rowOf = (name: RegExp) => within(screen.getByRole('table', { name: '3 regions' })).getByRole('row', { name });
+const rowOf = (name: RegExp) =>
+  within(screen.getByRole('table', { name: '3 regions' })).getByRole('row', { name });
 
 test('picking a row marks its region on the map, opens its panel and stands in the address', async () => {
   const user = userEvent.setup();
@@ -110,7 +119,9 @@ test('numbers carry sign, true minus and interval, kinds their names', () => {
   expect(screen.getByText('\u22120.42', { selector: '.big-value' })).toBeInTheDocument();
   expect(screen.getByText('5–95 %: \u22120.81 to \u22120.12')).toBeInTheDocument();
   expect(
-    screen.getByText(/Direct forcing, top of atmosphere, all sky, net \(SW \u22120\.61, LW \+0\.19\), dust alone/),
+    screen.getByText(
+      /Direct forcing, top of atmosphere, all sky, net \(SW \u22120\.61, LW \+0\.19\), dust alone/,
+    ),
   ).toBeInTheDocument();
   expect(screen.getByText(/another kind, not to be subtracted by eye/)).toBeInTheDocument();
   expect(screen.getByText('Direct effect, Last Glacial Maximum, all sky')).toBeInTheDocument();

@@ -16,7 +16,13 @@ export function Fold({ number, question, sentence, source, open, onToggle, child
   const body = useId();
   return (
     <section className={open ? 'fold open' : 'fold'} aria-label={question}>
-      <button type="button" className="fold-head" aria-expanded={open} aria-controls={body} onClick={onToggle}>
+      <button
+        type="button"
+        className="fold-head"
+        aria-expanded={open}
+        aria-controls={body}
+        onClick={onToggle}
+      >
         <span className="fold-number" aria-hidden="true">
           {number}
         </span>

@@ -18,10 +18,16 @@ export function GroundFold({ setUp, backdrops, problem, onChange }: Props) {
     <>
       <div className="fold-grid">
         <FormField name="backdropVersionId" problem={problem} label="Surface albedo and cloud" required>
-          <Select value={setUp.backdrop ?? ''} onChange={(_, data) => onChange({ backdrop: data.value || null })}>
+          <Select
+            value={setUp.backdrop ?? ''}
+            onChange={(_, data) => onChange({ backdrop: data.value || null })}
+          >
             <option value="">Pick a table</option>
             {backdrops.map((one) => (
-              <option key={one.versionId} value={one.versionId}>{`${one.title}, version ${one.number}`}</option>
+              <option
+                key={one.versionId}
+                value={one.versionId}
+              >{`${one.title}, version ${one.number}`}</option>
             ))}
           </Select>
         </FormField>

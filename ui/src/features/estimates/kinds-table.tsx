@@ -28,8 +28,8 @@ export function KindsTable({ result }: { result: EstimateResult }) {
       }
       note={
         <>
-          Forcing = slice minus reference. Direct effect = with this dust minus without any: another kind. Dust in the
-          air: {formatNumber(global.burdenSliceTg, { figures: 2 })} <Unit of="Tg" /> against{' '}
+          Forcing = slice minus reference. Direct effect = with this dust minus without any: another kind.
+          Dust in the air: {formatNumber(global.burdenSliceTg, { figures: 2 })} <Unit of="Tg" /> against{' '}
           {formatNumber(global.burdenReferenceTg, { figures: 2 })} <Unit of="Tg" />.
         </>
       }

@@ -77,7 +77,11 @@ export function MethodFold({ setUp, problem, onChange }: FoldProps) {
           onChange={(seed) => onChange({ seed })}
         />
         <FormField name="title" problem={problem} label="Title" hint="Left empty, the slices name it.">
-          <Input maxLength={200} value={setUp.title} onChange={(_, data) => onChange({ title: data.value })} />
+          <Input
+            maxLength={200}
+            value={setUp.title}
+            onChange={(_, data) => onChange({ title: data.value })}
+          />
         </FormField>
       </div>
     </>

@@ -29,7 +29,9 @@ export function PreviewPane({ result, waiting, complete, error, since, onRetry }
           {waiting ? 'computing' : result && complete ? 'from few members' : ''}
         </span>
       </div>
-      {!complete && <p className="sl-13 sl-second">Pick a field, optics and ground: the result shows here at once.</p>}
+      {!complete && (
+        <p className="sl-13 sl-second">Pick a field, optics and ground: the result shows here at once.</p>
+      )}
       {complete && Boolean(error) && (
         <ErrorState error={error} kept="Your set-up is kept in the address." retry={onRetry} />
       )}

@@ -59,7 +59,10 @@ function RegionNumbers({ region }: { region: EstimateRegionResult }) {
     ['Net forcing', <Amount key="net" of={region.forcing.netWm2} unit="W m-2" />],
     ['Shortwave', <Amount key="sw" of={region.forcing.shortwaveWm2} unit="W m-2" />],
     ['Longwave', <Amount key="lw" of={region.forcing.longwaveWm2} unit="W m-2" />],
-    ['Direct effect of the slice (another kind)', <Amount key="de" of={region.directEffect.netWm2} unit="W m-2" />],
+    [
+      'Direct effect of the slice (another kind)',
+      <Amount key="de" of={region.directEffect.netWm2} unit="W m-2" />,
+    ],
   ];
   return (
     <dl className="region-numbers">
@@ -78,7 +81,8 @@ function RegionNumbers({ region }: { region: EstimateRegionResult }) {
       <div>
         <dt>Surface albedo, cloud</dt>
         <dd>
-          {formatNumber(region.surfaceAlbedo, { decimals: 2 })}, {formatNumber(region.cloudFraction, { decimals: 2 })}
+          {formatNumber(region.surfaceAlbedo, { decimals: 2 })},{' '}
+          {formatNumber(region.cloudFraction, { decimals: 2 })}
         </dd>
       </div>
     </dl>

@@ -70,13 +70,15 @@ type Props = Pick<Step, 'selected' | 'onSelect' | 'onHover'> & {
 
 /** Regions and the global mean, in step with the map. */
 export function RegionTable({ result, part, usedSites, selected, onSelect, onHover }: Props) {
-  const { regions, global } = result;
+  const { regions, global, outside } = result;
   const columns = useMemo(() => columnsFor(domainOf(regions, part), part), [regions, part]);
-  const total: Row = useMemo(
-    () => ({ code: 'global', name: 'Global mean', siteCount: usedSites, hatched: false, forcing: global.forcing }),
-    [global, usedSites],
-  );
-  const pinned = useMemo(() => [total], [total]);
+  const pinned = useMemo<Row[]>(() => {
+    const total = { code: 'global', name: 'Global mean', siteCount: usedSites, hatched: false };
+    const rest = { code: 'outside', name: 'In no region', siteCount: 0, hatched: false };
+    const totals = [{ ...total, forcing: global.forcing }];
+    // With it the regions add up to the globe; nothing is shown where they already do.
+    return outside.areaShare > 0 ? [...totals, { ...rest, forcing: outside.forcing }] : totals;
+  }, [global, outside, usedSites]);
   return (
     <DataTable<Row>
       caption={`${regions.length} regions`}
@@ -90,7 +92,7 @@ export function RegionTable({ result, part, usedSites, selected, onSelect, onHov
       heightPx={356}
       selectedKey={selected}
       onSelect={(row) => onSelect(row.code)}
-      onHover={(row) => onHover(row && row.code !== 'global' ? row.code : null)}
+      onHover={(row) => onHover(row && !pinned.includes(row) ? row.code : null)}
       empty={<p className="sl-13 sl-muted">No region.</p>}
       foot={
         <>

@@ -62,6 +62,7 @@ export const inventedResult: EstimateResult = {
     region('SSA', 'Southern South America', -1.72, true),
     region('ARS', 'Arabian Sea', -1.16, false),
   ],
+  outside: { areaShare: 0.001, forcing: triple(-0.02, -0.05, 0.01) },
   varied: [],
   cautions: [{ code: 'interval-covers-varied-inputs', message: 'The interval covers 7 varied inputs.' }],
 };

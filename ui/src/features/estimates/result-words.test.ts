@@ -20,7 +20,9 @@ test('the headline says against what, whose dust and which way', () => {
 });
 
 test('a sign that the interval leaves open is not claimed', () => {
-  expect(headlineOf(withNet(-0.2, -0.5, 0.1))).toMatch(/more likely cools the planet than not; the interval holds zero/);
+  expect(headlineOf(withNet(-0.2, -0.5, 0.1))).toMatch(
+    /more likely cools the planet than not; the interval holds zero/,
+  );
 });
 
 test('a result that rounds to nothing is said to be nothing', () => {

@@ -10,14 +10,16 @@ const holdsZero = ({ low, high }: Interval) => low !== null && high !== null && 
 export function headlineOf({ label, global }: EstimateResult): string {
   const net = global.forcing.netWm2;
   const start = `Against ${sliceWithin(label.referenceName)}, the dust of ${sliceWithArticle(label.sliceName)}`;
-  if (Number(net.value.toFixed(decimalsOf(net))) === 0) return `${start} leaves the planet’s balance as it was.`;
+  if (Number(net.value.toFixed(decimalsOf(net))) === 0)
+    return `${start} leaves the planet’s balance as it was.`;
   const verb = net.value < 0 ? 'cools' : 'warms';
   return holdsZero(net)
     ? `${start} more likely ${verb} the planet than not; the interval holds zero.`
     : `${start} ${verb} the planet.`;
 }
 
-const signed = (amount: Interval) => formatNumber(amount.value, { decimals: decimalsOf(amount), signed: true });
+const signed = (amount: Interval) =>
+  formatNumber(amount.value, { decimals: decimalsOf(amount), signed: true });
 
 /** What kind of number it is: two numbers with different labels are not to be compared. */
 export function labelLine({ label, global }: EstimateResult): string {

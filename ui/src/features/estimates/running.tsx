@@ -30,7 +30,9 @@ function FollowedJob({ jobId, estimateId }: { jobId: string; estimateId: string 
   }, [over, client, estimateId]);
   if (job.isError) return <ErrorState error={job.error} retry={() => void job.refetch()} />;
   if (!job.data) return <LoadingRows rows={2} label="Loading the job" />;
-  return <JobCard job={job.data} hint="You may leave this page: the top bar keeps count, and the run goes on." />;
+  return (
+    <JobCard job={job.data} hint="You may leave this page: the top bar keeps count, and the run goes on." />
+  );
 }
 
 function Ended({ estimate: { id, request, state } }: { estimate: EstimateDetail }) {
@@ -46,7 +48,11 @@ function Ended({ estimate: { id, request, state } }: { estimate: EstimateDetail 
   return (
     <>
       <EmptyState
-        title={state === 'failed' ? 'This run failed; it has no result.' : 'This run was cancelled; it has no result.'}
+        title={
+          state === 'failed'
+            ? 'This run failed; it has no result.'
+            : 'This run was cancelled; it has no result.'
+        }
         action={
           <Button appearance="primary" disabled={again.isPending} onClick={() => again.mutate()}>
             Run again

@@ -39,7 +39,11 @@ export function opticsSentence(set: OpticalSetView | undefined, setUp: SetUp): S
   const { low, central, high } = set.singleScatteringAlbedo;
   const text = (value: number) => formatNumber(value, { decimals: 3 });
   const longwave: Sentence = setUp.longwave
-    ? ['; longwave ', chosen('on'), `, ${formatNumber(setUp.longwaveEfficiency, { figures: 3, signed: true })} W/m² per unit optical depth.`]
+    ? [
+        '; longwave ',
+        chosen('on'),
+        `, ${formatNumber(setUp.longwaveEfficiency, { figures: 3, signed: true })} W/m² per unit optical depth.`,
+      ]
     : ['; longwave ', chosen('off'), '.'];
   return [
     'Optical set ',

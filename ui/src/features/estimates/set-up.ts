@@ -50,11 +50,17 @@ const whole: ReadonlySet<NumberName> = new Set(['members', 'seed']);
 export function faultOf(name: NumberName, value: number): string | null {
   const [low, high] = setUpRanges[name];
   if (whole.has(name) && !Number.isInteger(value)) return 'Enter a whole number.';
-  if (value < low || value > high) return `Enter a number from ${String(low).replace('-', '\u2212')} to ${high}.`;
+  if (value < low || value > high)
+    return `Enter a number from ${String(low).replace('-', '\u2212')} to ${high}.`;
   return null;
 }
 
-const methods: readonly EstimateMethodId[] = ['thin-layer-daily', 'thin-layer', 'simple-albedo', 'efficiency'];
+const methods: readonly EstimateMethodId[] = [
+  'thin-layer-daily',
+  'thin-layer',
+  'simple-albedo',
+  'efficiency',
+];
 
 function numberOf(params: URLSearchParams, name: NumberName): number {
   const text = params.get(name);

@@ -8,7 +8,9 @@ import type { DataColumn } from '../../shared/table/column';
 type Month = NonNullable<EstimateResult['monthly']>[number];
 
 const LETTERS = [...'JFMAMJJASOND'];
-const names = 'January February March April May June July August September October November December'.split(' ');
+const names = 'January February March April May June July August September October November December'.split(
+  ' ',
+);
 
 const column = (id: string, header: string, value: (row: Month) => number): DataColumn<Month> => ({
   id,

@@ -4,7 +4,10 @@ import { infiniteQueryOptions } from '@tanstack/react-query';
 import { api } from '../../shared/api/client';
 
 export const exportFormats: Record<ExportFormat, { name: string; says: string }> = {
-  'regional-table-csv': { name: 'Regional table, CSV', says: 'one row for each region, units in the headings' },
+  'regional-table-csv': {
+    name: 'Regional table, CSV',
+    says: 'one row for each region, units in the headings',
+  },
   'slice-fields-netcdf': { name: 'Slice fields, NetCDF', says: 'gridded, CF conventions' },
 };
 
@@ -17,7 +20,8 @@ export const exportsQuery = infiniteQueryOptions({
     api.get<Page<ExportSummary>>('/exports', { params: { limit: 50, cursor: pageParam ?? undefined } }),
   initialPageParam: null as string | null,
   getNextPageParam: (page) => page.nextCursor,
-  refetchInterval: (query) => (query.state.data?.pages.some((page) => page.items.some(isWaiting)) ? 2000 : false),
+  refetchInterval: (query) =>
+    query.state.data?.pages.some((page) => page.items.some(isWaiting)) ? 2000 : false,
 });
 
 export const requestExport = (estimateId: string, format: ExportFormat) =>

@@ -40,8 +40,8 @@ export function Snippet({ file }: { file: ExportSummary }) {
       }
       note={
         <>
-          The token is read from the environment variable SILTLIGHT_TOKEN. <Link to="/profile">Make a token</Link> with
-          the right to read.
+          The token is read from the environment variable SILTLIGHT_TOKEN.{' '}
+          <Link to="/profile">Make a token</Link> with the right to read.
         </>
       }
     >

@@ -51,7 +51,11 @@ export function FieldMap({ field, selected, hovered, onSelect, onHover }: Props)
     [regions.data, field, selected, hovered],
   );
   return (
-    <Figure title="Dust ratio by region" sub={`${field.sliceName} over ${sliceWithin(field.referenceName)}`} picture={mapPicture(data)}>
+    <Figure
+      title="Dust ratio by region"
+      sub={`${field.sliceName} over ${sliceWithin(field.referenceName)}`}
+      picture={mapPicture(data)}
+    >
       {regions.isError && <ErrorState error={regions.error} retry={() => void regions.refetch()} />}
       {regions.data ? (
         <ForcingMap

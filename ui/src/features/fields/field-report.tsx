@@ -57,8 +57,9 @@ function FieldHeadline({ field }: { field: FieldDetail }) {
         <p>{spreadInWords(diagnostics)}</p>
         <p>{filledInWords(diagnostics)}</p>
         <p>
-          Optical depth at 550 nm, global mean: <b>{formatNumber(field.globalOpticalDepthSlice, { figures: 2 })}</b>{' '}
-          against <b>{formatNumber(field.globalOpticalDepthReference, { figures: 2 })}</b>. Base field:{' '}
+          Optical depth at 550 nm, global mean:{' '}
+          <b>{formatNumber(field.globalOpticalDepthSlice, { figures: 2 })}</b> against{' '}
+          <b>{formatNumber(field.globalOpticalDepthReference, { figures: 2 })}</b>. Base field:{' '}
           {field.baseField.title}.
         </p>
       </div>

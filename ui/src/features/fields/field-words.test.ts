@@ -19,7 +19,9 @@ test('the spread between sites is told as a factor with its share', () => {
 });
 
 test('sites that agree within their errors are said to agree', () => {
-  expect(spreadInWords({ ...diagnostics, tauSquared: 0, iSquared: 0 })).toMatch(/agree within their own errors/);
+  expect(spreadInWords({ ...diagnostics, tauSquared: 0, iSquared: 0 })).toMatch(
+    /agree within their own errors/,
+  );
 });
 
 test('the size fractions to choose from are the one in use and those set aside for it', () => {

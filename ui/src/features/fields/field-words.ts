@@ -27,7 +27,8 @@ export const filledInWords = ({ areaByGlobalRatioShare }: Diagnostics) =>
     : `${formatPercent(areaByGlobalRatioShare)} of the Earth has no site of its own and takes the global ratio.`;
 
 export const usedSites = (sites: readonly FieldSite[]) => sites.filter((site) => site.unusedReason === null);
-export const unusedSites = (sites: readonly FieldSite[]) => sites.filter((site) => site.unusedReason !== null);
+export const unusedSites = (sites: readonly FieldSite[]) =>
+  sites.filter((site) => site.unusedReason !== null);
 
 const fraction = /^another size fraction \((.+)\)$/;
 

@@ -6,7 +6,12 @@ import { ForcingUnit } from '../../shared/number/unit';
 import '../../shared/table/table.css';
 import { orbitalAgeText } from './slice-words';
 
-const rows: { name: string; head: ReactNode; decimals: number; of: (slice: SliceContent) => number | null }[] = [
+const rows: {
+  name: string;
+  head: ReactNode;
+  decimals: number;
+  of: (slice: SliceContent) => number | null;
+}[] = [
   {
     name: 'co2',
     head: (

@@ -9,7 +9,13 @@ import { sliceWithin } from '../../shared/page/slice-name';
 import type { DataColumn } from '../../shared/table/column';
 import { useColourMode } from '../../shared/theme/colour-mode';
 import { forcingColour, gradient, ramps } from '../../shared/theme/ramps';
-import { ANOMALY_STEP_DEG, insolationAnomaly, MONTH_NAMES, MONTHS, type AnomalyCell } from './insolation-anomaly';
+import {
+  ANOMALY_STEP_DEG,
+  insolationAnomaly,
+  MONTH_NAMES,
+  MONTHS,
+  type AnomalyCell,
+} from './insolation-anomaly';
 
 const LEFT_PX = 40;
 const FOOT_PX = 20;

@@ -17,7 +17,12 @@ const PLOT_PX = 60;
 const TOP_PX = 22;
 const LEFT_PX = 48;
 
-const panels: { name: string; domain: [number, number]; of: (point: OrbitPoint) => number; colour: number }[] = [
+const panels: {
+  name: string;
+  domain: [number, number];
+  of: (point: OrbitPoint) => number;
+  colour: number;
+}[] = [
   { name: 'eccentricity', domain: [0.01, 0.05], of: (point) => point.eccentricity, colour: 0 },
   { name: 'obliquity, degrees', domain: [22, 25], of: (point) => point.obliquityDeg, colour: 2 },
   { name: 'climatic precession', domain: [-0.05, 0.05], of: (point) => point.precession, colour: 1 },
@@ -44,10 +49,10 @@ export function OrbitFigure({ slice }: { slice: SliceContent }) {
       table={{ columns, rows: series, rowKey: (row) => String(row.ageKa) }}
       note={
         <>
-          At {orbitalAgeText(slice)}: eccentricity <b>{formatNumber(eccentricity, { decimals: 4 })}</b>, obliquity{' '}
-          <b>{formatNumber(obliquityDeg, { decimals: 2 })}°</b>, perihelion at{' '}
-          <b>{formatNumber(perihelionLongitudeDeg, { decimals: 1 })}°</b> ({slice.orbitSource}). Curves: Berger
-          1978.{!inside && ' This slice is older than the axis.'}
+          At {orbitalAgeText(slice)}: eccentricity <b>{formatNumber(eccentricity, { decimals: 4 })}</b>,
+          obliquity <b>{formatNumber(obliquityDeg, { decimals: 2 })}°</b>, perihelion at{' '}
+          <b>{formatNumber(perihelionLongitudeDeg, { decimals: 1 })}°</b> ({slice.orbitSource}). Curves:
+          Berger 1978.{!inside && ' This slice is older than the axis.'}
         </>
       }
     >

@@ -38,7 +38,9 @@ const columns: DataColumn<EstimateRow>[] = [
     id: 'state',
     header: 'State',
     value: (row) => row.state,
-    cell: (row) => <StateTag state={row.stale ? 'stale' : row.state} word={row.stale ? undefined : wordOf(row.state)} />,
+    cell: (row) => (
+      <StateTag state={row.stale ? 'stale' : row.state} word={row.stale ? undefined : wordOf(row.state)} />
+    ),
   },
   {
     id: 'when',
@@ -63,7 +65,9 @@ export function SliceEstimates({ estimates }: { estimates: EstimateRow[] }) {
         rowKey={(row) => row.id}
         startSort="when"
         startDescending
-        empty={<p className="sl-13 sl-muted">None yet. Build a field, then start an estimate from its page.</p>}
+        empty={
+          <p className="sl-13 sl-muted">None yet. Build a field, then start an estimate from its page.</p>
+        }
       />
     </Figure>
   );

@@ -3,7 +3,8 @@ import type { SiteTrace } from '@siltlight/common/wire/slices';
 type Place = { sheet: string; row: number; cell: string | null };
 
 /** Column letters of a cell address: F of F7, AB of $AB$12; null where it is none. */
-export const columnOf = (cell: string): string | null => /^\$?([A-Z]{1,3})\$?\d+$/i.exec(cell)?.[1]?.toUpperCase() ?? null;
+export const columnOf = (cell: string): string | null =>
+  /^\$?([A-Z]{1,3})\$?\d+$/i.exec(cell)?.[1]?.toUpperCase() ?? null;
 
 /** An address as people know it from spreadsheets: Sheet1!F7, quoted where the name has blanks. */
 export function cellAddress({ sheet, row, cell }: Place): string {

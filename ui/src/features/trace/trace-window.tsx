@@ -66,7 +66,8 @@ function columnsFor(trace: SiteTrace, totalWeight: number): DataColumn<Sample>[]
       id: 'weight',
       header: 'Weight',
       value: (row) => row.weight,
-      cell: (row) => (totalWeight > 0 ? formatPercent(row.weight / totalWeight, 1) : formatNumber(row.weight)),
+      cell: (row) =>
+        totalWeight > 0 ? formatPercent(row.weight / totalWeight, 1) : formatNumber(row.weight),
       align: 'right',
     },
   ];
@@ -96,7 +97,11 @@ export function TraceWindow({ trace, window }: { trace: SiteTrace; window: Windo
         rowKey={(row) => row.sampleId}
         startSort="age"
         heightPx={420}
-        empty={<p className="sl-13 sl-muted">No sample of this site lies inside the window: no flux follows from it.</p>}
+        empty={
+          <p className="sl-13 sl-muted">
+            No sample of this site lies inside the window: no flux follows from it.
+          </p>
+        }
         foot="A sample weighs by the time it stands for inside the window."
       />
     </Figure>

@@ -19,7 +19,9 @@ const names = new Map([
 ]);
 
 test('codes at the start of a message give way to names, many of them to a count', () => {
-  expect(withRegionNames('SAH, ARP: bright ground.', names)).toBe('Sahara, Arabian Peninsula: bright ground.');
+  expect(withRegionNames('SAH, ARP: bright ground.', names)).toBe(
+    'Sahara, Arabian Peninsula: bright ground.',
+  );
   expect(withRegionNames('SAH, ARP, CAR, SAS, MED: thick.', names)).toBe(
     'Sahara, Arabian Peninsula, Caribbean and 2 more regions: thick.',
   );

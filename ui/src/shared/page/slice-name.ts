@@ -1,5 +1,6 @@
 /** Name of a slice after another word: "pre-industrial", "mid-Holocene"; proper names keep their capitals. */
-export const sliceWithin = (name: string) => name.replace(/^(Pre|Mid|Present)(?=-)/, (word) => word.toLowerCase());
+export const sliceWithin = (name: string) =>
+  name.replace(/^(Pre|Mid|Present)(?=-)/, (word) => word.toLowerCase());
 
 /** Name of a slice as the owner of something: "the Last Glacial Maximum", "Marine Isotope Stage 3", "pre-industrial time". */
 export function sliceWithArticle(name: string): string {

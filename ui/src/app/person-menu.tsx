@@ -13,7 +13,7 @@ import {
 import { useMutation } from '@tanstack/react-query';
 import { useNavigate } from 'react-router-dom';
 import { signOut } from '../features/session/queries';
-import { endSession, usePerson, useSession } from '../shared/api/session';
+import { usePerson, useSession } from '../shared/api/session';
 import { useSay } from '../shared/feedback/toasts';
 import { useColourMode, type ThemeChoice } from '../shared/theme/colour-mode';
 import { menuOf } from './sections';
@@ -27,10 +27,8 @@ export function PersonMenu() {
   const say = useSay();
   const leave = useMutation({
     mutationFn: signOut,
-    onSuccess: async () => {
-      await navigate('/sign-in');
-      endSession();
-    },
+    // A page of its own: nothing that was loaded for this person stays in memory.
+    onSuccess: () => window.location.assign('/sign-in'),
     onError: (error) => say('You are still signed in', error.message, 'error'),
   });
   return (

@@ -1,6 +1,5 @@
 import { createBrowserRouter, redirect, type RouteObject } from 'react-router-dom';
 import { whenSignedOut } from '../shared/api/client';
-import { endSession } from '../shared/api/session';
 import { LoadingFigure } from '../shared/feedback/loading';
 import NotFound from '../routes/not-found';
 import { Frame, frameLoader } from './frame';
@@ -47,7 +46,7 @@ export function createRouter() {
   whenSignedOut(() => {
     const { pathname, search } = router.state.location;
     if (pathname === '/sign-in') return;
-    void router.navigate(`/sign-in?next=${encodeURIComponent(pathname + search)}`).then(endSession);
+    window.location.assign(`/sign-in?next=${encodeURIComponent(pathname + search)}`);
   });
   return router;
 }

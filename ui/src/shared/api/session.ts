@@ -32,12 +32,6 @@ export function beginSession(answer: SessionAnswer): void {
   queryClient.setQueryData(sessionQuery.queryKey, openSession(answer));
 }
 
-export function endSession(): void {
-  rememberCsrfToken(undefined);
-  queryClient.clear();
-  queryClient.setQueryData(sessionQuery.queryKey, signedOut);
-}
-
 export const useSession = () => useSuspenseQuery(sessionQuery).data;
 
 /** The person of a page behind sign-in; such pages are never drawn without one. */

@@ -8,6 +8,9 @@ import {
   calculateHumidityGrowth,
   type HumidityGrowthRequest,
 } from '@siltlight/common/optics/humidity-growth';
+import { calculateMie, type MieRequest } from '@siltlight/common/optics/calculate-mie';
+import { calculateMixedIndex, type MixedIndexRequest } from '@siltlight/common/optics/calculate-mixed-index';
+import { calculateModeOptics, type ModeOpticsRequest } from '@siltlight/common/optics/calculate-mode-optics';
 import { calculateUpscatter, type UpscatterRequest } from '@siltlight/common/optics/calculate-upscatter';
 import { calculateInsolation, type InsolationRequest } from '@siltlight/common/orbit/calculate-insolation';
 import { calculateOrbit, type OrbitRequest } from '@siltlight/common/orbit/calculate-orbit';
@@ -50,6 +53,30 @@ export class CalculatorsController {
   @ApiOperation({ summary: 'Reflectance, transmittance and absorptance of a layer over its surface' })
   layer(@Body() body: PlainObjectDto) {
     return calculateLayer(body as unknown as LayerRequest);
+  }
+
+  @Post('mie')
+  @HttpCode(200)
+  @ApiBody({ schema: requestSchemas.mie })
+  @ApiOperation({ summary: 'Efficiencies and asymmetry of one homogeneous sphere' })
+  mie(@Body() body: PlainObjectDto) {
+    return calculateMie(body as unknown as MieRequest);
+  }
+
+  @Post('mode-optics')
+  @HttpCode(200)
+  @ApiBody({ schema: requestSchemas['mode-optics'] })
+  @ApiOperation({ summary: 'Optics of an external mixture of lognormal modes at one wavelength' })
+  modeOptics(@Body() body: PlainObjectDto) {
+    return calculateModeOptics(body as unknown as ModeOpticsRequest);
+  }
+
+  @Post('mixed-index')
+  @HttpCode(200)
+  @ApiBody({ schema: requestSchemas['mixed-index'] })
+  @ApiOperation({ summary: 'Refractive index of an internal mixture' })
+  mixedIndex(@Body() body: PlainObjectDto) {
+    return calculateMixedIndex(body as unknown as MixedIndexRequest);
   }
 
   @Post('upscatter')

@@ -2,6 +2,7 @@ import type { ApiBodyOptions } from '@nestjs/swagger';
 import { LAYER_SCHEME_IDS } from '@siltlight/common/forcing/calculate-layer';
 import { FORCING_METHODS } from '@siltlight/common/forcing/methods';
 import { CLOSURE_IDS } from '@siltlight/common/forcing/two-stream-closures';
+import { MIXING_RULES } from '@siltlight/common/optics/mixed-index';
 
 type SchemaObject = Exclude<Extract<ApiBodyOptions, { schema: unknown }>['schema'], { $ref: string }>;
 
@@ -18,6 +19,8 @@ const object = (properties: Properties, required = Object.keys(properties)): Sch
 });
 
 const orbit = object(numbers('eccentricity', 'obliquityDeg', 'perihelionLongitudeDeg'));
+const refractiveIndex = object(numbers('real', 'imaginary'));
+const list = (items: SchemaObject): SchemaObject => ({ type: 'array', items, minItems: 1 });
 const gases = object(numbers('co2Ppm', 'ch4Ppb', 'n2oPpb'));
 const longwave: SchemaObject = {
   description:
@@ -81,6 +84,24 @@ export const requestSchemas = {
     },
     ['opticalDepth', 'singleScatteringAlbedo', 'asymmetry', 'surfaceAlbedo', 'scheme'],
   ),
+  mie: object({ ...numbers('sizeParameter'), refractiveIndex }),
+  'mode-optics': object({
+    ...numbers('wavelengthUm'),
+    modes: list(
+      object(
+        {
+          ...numbers('medianRadiusUm', 'geometricStdDev', 'numberFraction', 'minRadiusUm', 'maxRadiusUm'),
+          ...numbers('densityGCm3'),
+          refractiveIndex,
+        },
+        ['medianRadiusUm', 'geometricStdDev', 'densityGCm3', 'refractiveIndex'],
+      ),
+    ),
+  }),
+  'mixed-index': object({
+    rule: choice(...MIXING_RULES),
+    components: list(object({ ...numbers('volumeFraction'), refractiveIndex })),
+  }),
   upscatter: object(
     { ...numbers('asymmetry', 'cosSolarZenith'), approximation: choice('henyey-greenstein', 'linear') },
     ['asymmetry'],

@@ -5,10 +5,12 @@ import { DatasetsService } from '../datasets/datasets.service';
 import { SamplesService } from '../datasets/samples.service';
 import { EstimateViews } from '../estimates/estimate-views.service';
 import { SlicesService } from '../slices/slices.service';
+import { SubmissionsService } from '../submissions/submissions.service';
 
 const MOST = 20;
+const SUBMISSIONS = 200;
 
-/** Finds slices, datasets, sites and estimates by a part of their name, whatever its case. */
+/** Finds slices, datasets, sites, estimates and submissions by a part of their name, whatever its case. */
 @Injectable()
 export class SearchService {
   constructor(
@@ -16,12 +18,18 @@ export class SearchService {
     private readonly datasets: DatasetsService,
     private readonly samples: SamplesService,
     private readonly estimates: EstimateViews,
+    private readonly submissions: SubmissionsService,
   ) {}
 
   async find(text: string, reader: Person): Promise<SearchHit[]> {
     const wanted = text.trim().toLowerCase();
     const hits = (
-      await Promise.all([this.sliceHits(), this.datasetHits(), this.estimateHits(reader)])
+      await Promise.all([
+        this.sliceHits(),
+        this.datasetHits(),
+        this.estimateHits(reader),
+        this.submissionHits(reader),
+      ])
     ).flat();
     return hits.filter(({ title }) => title.toLowerCase().includes(wanted)).slice(0, MOST);
   }
@@ -61,6 +69,18 @@ export class SearchService {
       title: `${run.title}, run ${run.runNumber}`,
       detail: state,
       path: `/estimates/${run.id}`,
+    }));
+  }
+
+  private async submissionHits(reader: Person): Promise<SearchHit[]> {
+    const contributes = reader.roles.some((role) => role === 'scientist' || role === 'steward');
+    if (!contributes) return [];
+    const { items } = await this.submissions.list({ limit: SUBMISSIONS }, reader);
+    return items.map(({ id, number, title, state }) => ({
+      kind: 'submission',
+      title: `${title} (${number})`,
+      detail: state,
+      path: `/intake/${id}`,
     }));
   }
 }

@@ -67,11 +67,17 @@ export class ExportsController {
   ) {
     const file = this.exports.finished(await this.exports.get(id, reader));
     attachment(response, file);
-    if (known === `"${file.sha256}"`) {
+    if (matches(known, file.sha256)) {
       response.removeHeader('Content-Length');
       response.status(304).end();
       return;
     }
     (await this.files.stream(file.sha256)).pipe(response);
   }
+}
+
+/** RFC 9110 §13.1.2: a list of tags, weak or strong, or any. */
+function matches(ifNoneMatch: string | undefined, sha256: string): boolean {
+  const tags = (ifNoneMatch ?? '').split(',').map((tag) => tag.trim().replace(/^W\//, ''));
+  return tags.includes('*') || tags.includes(`"${sha256}"`);
 }

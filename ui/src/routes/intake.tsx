@@ -28,12 +28,15 @@ function useListView(isSteward: boolean) {
     setParams(
       (before) => {
         const after = new URLSearchParams(before);
-        for (const [name, value] of Object.entries(next)) value ? after.set(name, value) : after.delete(name);
+        for (const [name, value] of Object.entries(next)) {
+          if (value) after.set(name, value);
+          else after.delete(name);
+        }
         return after;
       },
       { preventScrollReset: true },
     );
-  return [{ view, state: view === 'queue' ? '' : (params.get('state') ?? '') } as ListView, change] as const;
+  return [{ view, state: view === 'queue' ? '' : (params.get('state') ?? '') }, change] as const;
 }
 
 export default function Intake() {

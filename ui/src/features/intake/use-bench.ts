@@ -42,8 +42,10 @@ export function useBench(detail: SubmissionDetail) {
       setParams(
         (before) => {
           const after = new URLSearchParams(before);
-          for (const [key, text] of Object.entries({ ...extra, [name]: value }))
-            text === null ? after.delete(key) : after.set(key, text);
+          for (const [key, text] of Object.entries({ ...extra, [name]: value })) {
+            if (text === null) after.delete(key);
+            else after.set(key, text);
+          }
           return after;
         },
         { preventScrollReset: true },

@@ -2,6 +2,7 @@ import { FluentProvider } from '@fluentui/react-components';
 import { fireEvent, render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { useState } from 'react';
+import { expect } from 'vitest';
 import { themes } from '../../../shared/theme/themes';
 import type { GridCommand } from './grid-command';
 import type { GridColumn } from './columns';

@@ -17,7 +17,7 @@ export function tidyMetadata(metadata: Metadata): Metadata {
       if (creators.length > 0) tidy[key] = creators;
     }
   }
-  return tidy as Metadata;
+  return tidy;
 }
 
 function tidyCreator({ name, orcid, affiliation }: Creator): Creator {

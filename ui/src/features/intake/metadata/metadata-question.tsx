@@ -36,7 +36,7 @@ function Answer({
 }) {
   const given = draft.metadata[field];
   const value = typeof given === 'string' ? given : '';
-  const set = (text: string) => draft.edit({ [field]: text === '' ? undefined : text } as Metadata);
+  const set = (text: string) => draft.edit({ [field]: text === '' ? undefined : text });
   if (input === 'long-text')
     return <Textarea {...wired} rows={3} value={value} onChange={(_, data) => set(data.value)} />;
   if (input === 'licence')

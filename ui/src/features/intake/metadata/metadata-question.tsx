@@ -2,7 +2,6 @@ import { Combobox, Input, Option, Select, Textarea } from '@fluentui/react-compo
 import type { MetadataField } from '@siltlight/common/dataset/metadata-form';
 import type { ApiProblem } from '../../../shared/api/api-problem';
 import { FormField } from '../../../shared/form/form-field';
-import type { Metadata } from '../changes';
 import type { MetadataDraft } from './use-metadata-draft';
 
 type Props = { question: MetadataField; draft: MetadataDraft; problem: ApiProblem | null; bySheet: boolean };

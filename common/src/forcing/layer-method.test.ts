@@ -58,8 +58,8 @@ test.each(EXACT_SLOPE)('%s has the first-order slope at each sun angle', (_, met
 });
 
 test.each(EXACT_SLOPE)(
-  '$id has, over the sunlit hemisphere, the slope of the half-day thin layer',
-  (method) => {
+  '%s has, over the sunlit hemisphere, the slope of the half-day thin layer',
+  (_, method) => {
     fc.assert(
       fc.property(share, share, anyAsymmetry, (singleScatteringAlbedo, surfaceAlbedo, asymmetry) => {
         const opticalDepth = 1e-5;

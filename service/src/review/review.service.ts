@@ -36,6 +36,7 @@ export class Review {
     });
   }
 
+  /** Any steward may: a submission must not be stuck with somebody who is away. That person is told. */
   release(editing: Editing): Promise<SubmissionRow> {
     const change = {
       ...editing,
@@ -44,8 +45,11 @@ export class Review {
       summary: () => 'put back into the queue',
     };
     return this.changes.run(change, async (submission, transaction) => {
-      requireReviewer(submission, editing.by);
+      const { reviewerId } = submission;
       await submission.update({ state: 'submitted', reviewerId: null }, { transaction });
+      if (reviewerId !== null && reviewerId !== editing.by.id) {
+        await this.tellReviewer(submission, reviewerId, editing.by, transaction);
+      }
     });
   }
 
@@ -142,6 +146,24 @@ export class Review {
       'four-eyes',
       'Another steward decides on this one',
       `You contributed to ${numberText(submission.number)}; whoever contributed or corrected a submission does not vet it.`,
+    );
+  }
+
+  private tellReviewer(
+    submission: SubmissionRow,
+    reviewerId: string,
+    by: Person,
+    transaction: Transaction,
+  ): Promise<void> {
+    return this.outbox.queue(
+      {
+        toPersonId: reviewerId,
+        mailKind: 'submission-released',
+        subject: `${numberText(submission.number)} is back in the queue`,
+        lines: [`${by.name} put "${submission.title}" back into the queue; you had it in review.`],
+        linkPath: `/intake/${submission.id}`,
+      },
+      transaction,
     );
   }
 

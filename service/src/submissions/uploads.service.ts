@@ -5,6 +5,7 @@ import type { RawWorkbook } from '@siltlight/common/sheet/grid';
 import { proposeWorkbook } from '@siltlight/common/sheet/propose';
 import type { SubmissionMetadata } from '@siltlight/common/vetting/context';
 import type { DatasetKindId } from '@siltlight/common/wire/submissions';
+import { Op, type Transaction } from 'sequelize';
 import type { Person } from '../auth/policy';
 import { WriteQueue } from '../database/write-queue';
 import { FileStore } from '../files/file-store.service';
@@ -21,6 +22,9 @@ export interface UploadedFile {
 }
 
 const MEDIA_TYPE = 'application/octet-stream';
+
+/** The same file again after this long is meant as another submission; the page then says that it was seen before. */
+const SAME_CLICK_MS = 10_000;
 
 /** Takes a file in: read apart from this process, kept byte for byte, understood, vetted. */
 @Injectable()
@@ -67,6 +71,11 @@ export class Uploads {
     };
     const { counts } = await this.evaluations.evaluate(draft);
     return this.writes.run(async (transaction) => {
+      const twin = await this.justSent(
+        { contributorId: by.id, fileSha256: sha256, fileName: file.fileName, kind },
+        transaction,
+      );
+      if (twin) return twin;
       const last = await this.submissions.max<number | null, SubmissionRow>('number', { transaction });
       const row = await this.submissions.create(
         {
@@ -101,6 +110,18 @@ export class Uploads {
         transaction,
       );
       return row;
+    });
+  }
+
+  /** A double click sends the same bytes twice within moments: that is one submission. */
+  private justSent(
+    same: Pick<SubmissionRow, 'contributorId' | 'fileSha256' | 'fileName' | 'kind'>,
+    transaction: Transaction,
+  ): Promise<SubmissionRow | null> {
+    const createdAt = { [Op.gt]: new Date(Date.now() - SAME_CLICK_MS).toISOString() };
+    return this.submissions.findOne({
+      where: { ...same, state: 'draft', revision: 1, createdAt },
+      transaction,
     });
   }
 }

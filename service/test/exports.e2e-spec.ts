@@ -164,7 +164,7 @@ test('files are made without a look at the clock or at the language of the machi
   const content = (await modeller.get(`${ESTIMATES}/${published.id}/run-record`).expect(200)).body;
   const slice = { windowYoungKa: 19, windowOldKa: 23, orbitalAgeKa: 21 };
   const { runNumber, state, checksum } = published;
-  const subject = { runNumber, state, checksum, slice, content, datasets: [] };
+  const subject = { runNumber, state, checksum: checksum!, slice, content, datasets: [] };
   for (const { make } of Object.values(FORMATS)) {
     const plain = make(subject);
     const looked = jest.fn();

@@ -7,6 +7,7 @@ import type {
 } from '@siltlight/common/wire/estimates';
 import type { ExportFormat, ExportSummary } from '@siltlight/common/wire/exports';
 import type { FieldDetail } from '@siltlight/common/wire/slices';
+import type { Response } from 'supertest';
 import type { SignedInCaller } from './sign-in';
 
 export const ESTIMATES = '/api/v1/estimates';
@@ -82,15 +83,13 @@ export async function exported(
   const path = `${EXPORTS}/${accepted.body.id}`;
   const summary = (await caller.get(path).expect(200)).body as ExportSummary;
   const file = await caller.get(`${path}/file`).buffer(true).parse(asBytes).expect(200);
-  return { summary, bytes: file.body as Buffer, headers: file.headers as Record<string, string> };
+  return { summary, bytes: file.body as Buffer, headers: file.headers };
 }
 
 /** Takes an answer as bytes, whatever its type. */
-export function asBytes(
-  answer: NodeJS.ReadableStream,
-  finish: (error: Error | null, body: Buffer) => void,
-): void {
+export function asBytes(answer: Response, finish: (error: Error | null, body: Buffer) => void): void {
   const parts: Buffer[] = [];
-  answer.on('data', (part: Buffer) => parts.push(part));
-  answer.on('end', () => finish(null, Buffer.concat(parts)));
+  const stream = answer as unknown as NodeJS.ReadableStream;
+  stream.on('data', (part: Buffer) => parts.push(part));
+  stream.on('end', () => finish(null, Buffer.concat(parts)));
 }

@@ -34,7 +34,7 @@ export const ageSeries: DatasetKind = {
       quantity: 'asGiven',
       canonicalUnit: '',
       required: false,
-      headings: ['value', 'd18o', 'benthic d18o', 'delta 18o', 'dd', 'deuterium', 'deuterium excess', 'd13c', 'temperature', 'temperature anomaly', 'layer thickness', 'lt', 'na', 'ca', 'nh4', 'no3', 'so4', 'fe', 'wert', 'valeur', 'valor'],
+      headings: ['value', 'd18o', 'd18 o', 'benthic d18 o', 'delta 18o', 'd d', 'dd', 'fpp', 'laser fpp', 'coulter counter fpp', 'fine particle percentage', 'deuterium', 'deuterium excess', 'd13c', 'temperature', 'temperature anomaly', 'layer thickness', 'lt', 'na', 'ca', 'nh4', 'no3', 'so4', 'fe', 'wert', 'valeur', 'valor'],
       help: 'Kept in the unit of its column, under the name of its heading.',
     },
     {

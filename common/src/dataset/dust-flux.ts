@@ -137,7 +137,7 @@ export const dustFlux: DatasetKind = {
       quantity: 'concentration',
       canonicalUnit: 'ng/g',
       required: false,
-      headings: ['dust concentration', 'dust conc', 'dust in ice', 'dust in ice mean', 'dust', 'dust mass', 'dust mass concentration', 'laser dust', 'laserdust', 'dust content', 'mineral dust', 'insoluble dust', 'staubkonzentration', 'staub', 'staubgehalt', 'concentration de poussiere', 'poussiere', 'concentracion de polvo', 'polvo', 'concentration'],
+      headings: ['dust concentration', 'dust conc', 'dust in ice', 'dust in ice mean', 'dust', 'dust mass', 'dust mass concentration', 'laser dust', 'laserdust', 'ccdust', 'cc dust', 'coulter dust', 'coulter counter dust', 'dust content', 'mineral dust', 'insoluble dust', 'staubkonzentration', 'staub', 'staubgehalt', 'concentration de poussiere', 'poussiere', 'concentracion de polvo', 'polvo', 'concentration'],
       min: 0,
       max: 1e9,
       help: 'Dust mass per mass of ice or sediment; needs an accumulation rate to become a flux.',

@@ -63,7 +63,7 @@ export const gasRecord: DatasetKind = {
       quantity: 'moleFractionPpb',
       canonicalUnit: 'ppb',
       required: false,
-      headings: ['n2o', 'nitrous oxide', 'n2o concentration', 'n2o mixing ratio', 'lachgas', 'distickstoffmonoxid', 'protoxyde d azote', 'oxido nitroso'],
+      headings: ['n2o', 'n2 o', 'nitrous oxide', 'n2o concentration', 'n2o mixing ratio', 'lachgas', 'distickstoffmonoxid', 'protoxyde d azote', 'oxido nitroso'],
       min: 50,
       max: 2000,
       help: 'Mole fraction in dry air.',

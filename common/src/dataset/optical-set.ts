@@ -1,7 +1,14 @@
 import type { DatasetKind, FieldDeclaration } from './field';
 import { pointOpticalDepth } from './point-optical-depth';
 
-const SHARED = ['wavelengthNm', 'singleScatteringAlbedo', 'asymmetry', 'aerosolSpecies', 'angstromExponent', 'humidityState'];
+const SHARED = [
+  'wavelengthNm',
+  'singleScatteringAlbedo',
+  'asymmetry',
+  'aerosolSpecies',
+  'angstromExponent',
+  'humidityState',
+];
 
 const shared = (): FieldDeclaration[] =>
   pointOpticalDepth.fields.filter(({ field }) => SHARED.includes(field));

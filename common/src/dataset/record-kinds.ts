@@ -20,11 +20,11 @@ export const RECORD_KINDS: readonly DatasetKind[] = [
 
 export const isRecordKind = (kind: DatasetKind): boolean => RECORD_KINDS.includes(kind);
 
+const BY_ID = new Map([...DATASET_KINDS, ...RECORD_KINDS].map((kind) => [kind.id, kind]));
+
 /** @throws DomainError `unknown-dataset-kind` for what is neither a kind of samples nor of records */
 export function readableKind(id: string): DatasetKind {
-  const kinds = [...DATASET_KINDS, ...RECORD_KINDS];
-  const kind = kinds.find((declared) => declared.id === id);
+  const kind = BY_ID.get(id);
   if (kind) return kind;
-  const allowed = kinds.map((declared) => declared.id);
-  throw new DomainError('unknown-dataset-kind', { field: 'kind', value: id, allowed });
+  throw new DomainError('unknown-dataset-kind', { field: 'kind', value: id, allowed: [...BY_ID.keys()] });
 }

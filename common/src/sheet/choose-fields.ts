@@ -1,5 +1,6 @@
 import type { DatasetKind } from '../dataset/field';
 import { isDustProxy } from '../dataset/flux-quantity';
+import { isRecordKind } from '../dataset/record-kinds';
 import type { RawSheet } from './grid';
 import { columnLetter } from './grid';
 import type { Claim } from './claim';
@@ -95,7 +96,8 @@ function oneColumnEach(claims: Claim[], kind: DatasetKind): Claim[] {
     claims.filter((claim) => claim.field === kind.valueField && claim.quantity).length > 1;
   const taken = new Map<string, Claim>();
   for (const claim of claims) {
-    if (claim.field === null || (severalFluxes && isFluxPart(claim, kind))) continue;
+    if (claim.field === null || (severalFluxes && isFluxPart(claim, kind)) || isOfMatrix(claim, kind))
+      continue;
     const best = taken.get(claim.field);
     if (!best || claim.confidence > best.confidence) taken.set(claim.field, claim);
   }
@@ -108,7 +110,7 @@ function oneColumnEach(claims: Claim[], kind: DatasetKind): Claim[] {
         reason: `${claim.reason} That column is not imported, so neither is this one.`,
       };
     }
-    const winner = taken.get(claim.field);
+    const winner = isOfMatrix(claim, kind) ? undefined : taken.get(claim.field);
     if (!winner || winner === claim) return claim;
     return {
       ...claim,
@@ -117,6 +119,10 @@ function oneColumnEach(claims: Claim[], kind: DatasetKind): Claim[] {
     };
   });
 }
+
+/** Columns of a matrix all hold the one value, and say so by their quantity. */
+const isOfMatrix = (claim: Claim, kind: DatasetKind): boolean =>
+  isRecordKind(kind) && claim.quantity !== undefined && !claim.uncertainty;
 
 const isFluxPart = (claim: Claim, kind: DatasetKind): boolean =>
   claim.field === kind.valueField || claim.field === kind.sigmaField;

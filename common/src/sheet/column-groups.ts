@@ -25,7 +25,7 @@ export function columnGroups(columns: MappedColumn[], kind: DatasetKind): Column
   if (values.length === 0)
     return [
       {
-        quantity: kind.id === 'dust-flux' ? 'dust' : kind.valueField,
+        quantity: kind.id === 'dust-flux' ? 'dust' : kind.id === 'age-series' ? 'event' : kind.valueField,
         columns: fields.flatMap((field) => of(field).slice(0, 1)),
       },
     ];
@@ -51,7 +51,9 @@ export function columnGroups(columns: MappedColumn[], kind: DatasetKind): Column
 
 function quantityOfColumn(proposal: ColumnProposal, kind: DatasetKind): string {
   if (kind.id === 'dust-flux') return quantityOf(proposal);
-  const isNamed = kind.fields.some(({ field, quantity }) => field === kind.valueField && quantity === 'asGiven');
+  const isNamed = kind.fields.some(
+    ({ field, quantity }) => field === kind.valueField && quantity === 'asGiven',
+  );
   return isNamed ? (proposal.quantity ?? proposal.heading) : kind.valueField;
 }
 

@@ -36,12 +36,17 @@ export function withColumnNotes(
     const note = byName.get(heading.text) ?? counted[filled.indexOf(heading)];
     if (!note) return heading;
     const unit = heading.unit ?? note.unit;
-    const key = known.has(heading.key) ? heading.key : headingKey(note.text.replace(/\(.*$/, '')) || heading.key;
+    const key = known.has(heading.key)
+      ? heading.key
+      : headingKey(note.text.replace(/\([^)]*\)/g, ' ')) || heading.key;
     return { ...heading, unit, key };
   });
 }
 
-function notesAbove(sheet: RawSheet, span: RowSpan): { byName: Map<string, ColumnNote>; inOrder: ColumnNote[] } {
+function notesAbove(
+  sheet: RawSheet,
+  span: RowSpan,
+): { byName: Map<string, ColumnNote>; inOrder: ColumnNote[] } {
   const byName = new Map<string, ColumnNote>();
   const inOrder: ColumnNote[] = [];
   for (let r = span.from - 1; r < Math.min(span.before - 1, sheet.rows.length); r += 1) {
@@ -59,7 +64,9 @@ function notesAbove(sheet: RawSheet, span: RowSpan): { byName: Map<string, Colum
 }
 
 function unitIn(text: string): string | null {
-  const brackets = [...text.matchAll(/\(([^()]{1,40})\)|\[([^\]]{1,40})\]/g)].map((found) => (found[1] ?? found[2] ?? '').trim());
+  const brackets = [...text.matchAll(/\(([^()]{1,40})\)|\[([^\]]{1,40})\]/g)].map((found) =>
+    (found[1] ?? found[2] ?? '').trim(),
+  );
   const unit = brackets.find((inner) => looksLikeUnit(inner) || isDatedAge(inner));
   if (unit !== undefined) return unit;
   const age = AGE_WORDS.exec(text)?.[1];

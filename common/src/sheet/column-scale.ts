@@ -30,7 +30,12 @@ export function scaleOf({ field, heading, unit, divisor, ageDatum }: ColumnSourc
   if (quantity === 'text' || quantity === 'count' || quantity === 'month')
     return { factor: 1, offset: 0, rule: 'as given', notes: [] };
   if (quantity === 'asGiven')
-    return { factor: 1 / divisor, offset: 0, rule: `as given${unit === null ? '' : `, in ${unit}`}${halved}`, notes: [] };
+    return {
+      factor: 1 / divisor,
+      offset: 0,
+      rule: `as given${unit === null ? '' : `, in ${unit}`}${halved}`,
+      notes: [],
+    };
   if (quantity === 'latitude' || quantity === 'longitude')
     return { factor: 1, offset: 0, rule: 'decimal degrees', notes: [] };
   if (quantity === 'age') return ageScale(unit, heading, ageDatum);
@@ -39,7 +44,12 @@ export function scaleOf({ field, heading, unit, divisor, ageDatum }: ColumnSourc
   const age = quantity === 'duration' ? parseAgeUnit(wanted) : null;
   const conversion =
     age && !isUnitProblem(age)
-      ? { factor: age.years / 1e3, offset: 0, explanation: `${age.text} × ${age.years / 1e3} = ka`, assumptions: [] }
+      ? {
+          factor: age.years / 1e3,
+          offset: 0,
+          explanation: `${age.text} × ${age.years / 1e3} = ka`,
+          assumptions: [],
+        }
       : convertTo(quantity, wanted);
   if (isUnitProblem(conversion))
     return { factor: 1, offset: 0, rule: 'unit not understood', problem: conversion, notes: [] };

@@ -28,6 +28,10 @@ export function findTables(sheet: RawSheet): FoundTable[] {
   for (;;) {
     const first = indexOfNumbers(shapes, from, shapes.length);
     if (first < 0) return tables;
+    if (isColumnNumbers(sheet, shapes, first)) {
+      from = first + 1;
+      continue;
+    }
     const headerRows = headersAbove(sheet, shapes, first, from);
     const last = lastOfRun(sheet, shapes, first);
     const unitsRow = unitsRowOf(sheet, headerRows);
@@ -44,6 +48,15 @@ export function findTables(sheet: RawSheet): FoundTable[] {
 function indexOfNumbers(shapes: RowShape[], from: number, to: number): number {
   for (let r = from; r < to; r += 1) if (shapes[r]?.kind === 'numbers') return r;
   return -1;
+}
+
+/** "1  2  3" right above the headings: the columns are numbered for a list of them in the text. */
+function isColumnNumbers(sheet: RawSheet, shapes: RowShape[], row: number): boolean {
+  const cells = (sheet.rows[row] ?? []).filter(isFilled);
+  const below = shapes[row + 1];
+  if (below?.kind !== 'text' || below.texts < 2 || below.filled !== cells.length) return false;
+  const numbers = cells.map((cell) => (/^\d{1,3}$/.test(cell.text.trim()) ? Number(cell.text) : NaN));
+  return numbers.length >= 2 && numbers.every((number, i) => i === 0 || number === numbers[i - 1]! + 1);
 }
 
 function lastOfRun(sheet: RawSheet, shapes: RowShape[], first: number): number {

@@ -36,22 +36,34 @@ function plainCell(cell: xlsx.CellObject | undefined): RawCell | null {
 }
 
 /** A delimited Latin-1 or UTF-8 sample as plain text cells. */
-export function sampleText(fileName: string, delimiter: string, encoding: 'latin1' | 'utf8'): RawWorkbook {
-  return textWorkbook(readFileSync(path.join(samples, fileName), encoding), delimiter, fileName);
+export function sampleText(
+  fileName: string,
+  delimiter: string | RegExp,
+  encoding: 'latin1' | 'utf8',
+): RawWorkbook {
+  return textWorkbook(
+    readFileSync(path.join(samples, fileName), encoding),
+    delimiter,
+    path.basename(fileName),
+  );
 }
 
-export function textWorkbook(text: string, delimiter = ',', fileName = 'made-for-a-test.csv'): RawWorkbook {
+export function textWorkbook(
+  text: string,
+  delimiter: string | RegExp = ',',
+  fileName = 'made-for-a-test.csv',
+): RawWorkbook {
   const rows = text
     .split(/\r?\n/)
     .map((line) =>
-      line
+      (typeof delimiter === 'string' ? line : line.trim())
         .split(delimiter)
         .map((cell): RawCell | null => (cell === '' ? null : { text: cell, kind: 'text' })),
     );
   return {
     fileName,
     format: 'csv',
-    delimiter,
+    delimiter: String(delimiter),
     sheets: [sheetOf(fileName.replace(/\.[^.]*$/, ''), rows)],
     readNotes: [],
   };

@@ -23,6 +23,7 @@ export function looksLikeUnit(text: string): boolean {
   const trimmed = text.trim().replace(/^[[(]|[\])]$/g, '');
   if (trimmed === '' || trimmed.length > 40 || STATISTIC.test(trimmed) || /^\d+\s?\p{L}?$/u.test(trimmed))
     return false;
+  if (/^(?:(?:°|º|deg\.?)\s?[CF]|℃|K|[Kk]elvin|[Cc]elsius)$/u.test(trimmed)) return true;
   return !isUnitProblem(parseUnit(trimmed)) || (isAgeText(trimmed) && !isUnitProblem(parseAgeUnit(trimmed)));
 }
 

@@ -12,7 +12,10 @@ import { type CellReading, spreadOf } from './read-column';
 import { readTables, type RowReading, type TablesRead } from './read-tables';
 
 /** Fields of rows that hold no cell of their own: told by the value's column, not by a field of the kind. */
-const LABELS: Record<string, string[]> = { 'gridded-field': ['quantity', 'unit'], 'age-series': ['quantity', 'unit'] };
+const LABELS: Record<string, string[]> = {
+  'gridded-field': ['quantity', 'unit'],
+  'age-series': ['quantity', 'unit'],
+};
 
 /**
  * Reads a workbook of a kind whose rows are no samples (grids, backdrop tables, refractive indices, optical sets,
@@ -50,7 +53,7 @@ function recordOf(kind: DatasetKind, { sheet, row, group, fields }: RowReading):
   for (const label of LABELS[kind.id] ?? [])
     record[label] = label === 'quantity' ? group.quantity : (group.columns[0]?.proposal.unit ?? null);
   if (kind.id === 'refractive-index') keepMagnitude(record, cells);
-  if (typeof record.month !== 'number') record.month = null;
+  if (record.month === 'annual') record.month = null;
   return { ...record, cells } as unknown as RecordRow;
 }
 
@@ -70,11 +73,19 @@ function addAxisOfHeading(
   readings: Map<string, CellReading>,
   row: number,
 ): void {
-  const axis = AXES[kind.id]?.find((field) => !readings.has(field) && valueOfHeading(field, heading) !== null);
+  const axis = AXES[kind.id]?.find(
+    (field) => !readings.has(field) && valueOfHeading(field, heading) !== null,
+  );
   const field = axis === undefined ? undefined : fieldOf(kind, axis);
   if (!field) return;
   const value = valueOfHeading(field.field, heading)!;
-  const traced = { cell: null, raw: heading, value, unit: field.canonicalUnit, rule: `heading of the column, row ${row}` };
+  const traced = {
+    cell: null,
+    raw: heading,
+    value,
+    unit: field.canonicalUnit,
+    rule: `heading of the column, row ${row}`,
+  };
   readings.set(field.field, { value, traced });
 }
 

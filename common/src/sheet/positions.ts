@@ -94,7 +94,16 @@ function inText(sheet: RawSheet, r: number, c: number): TableConstant[] {
   const pair = positionInText(textOf(sheet.rows[r]?.[c]));
   if (!pair) return [];
   const cell = cellAddress(c, r + 1);
+  const elevation =
+    /(?<![\d.,])(-?\d{1,4}(?:\.\d+)?)\s?m(?:etres|eters)?\s(?:above sea level|a\.?\s?s\.?\s?l)/i.exec(
+      textOf(sheet.rows[r]?.[c]),
+    )?.[1];
+  const height =
+    elevation === undefined
+      ? []
+      : [constant(sheet, 'elevationM', elevation, 'm', cell, 'Named in a line above the table.')];
   return [
+    ...height,
     constant(sheet, 'latitudeDeg', pair[0], '°', cell, 'Named in a line above the table.'),
     constant(sheet, 'longitudeDeg', pair[1], '°', cell, 'Named in a line above the table.'),
   ];

@@ -4,9 +4,10 @@ import { missingCodeOf } from '../units/missing-code';
 import { chooseFields } from './choose-fields';
 import { columnHeadings } from './column-headings';
 import { withColumnNotes } from './column-notes';
-import { datumInProse, withProseDatum } from './datum-in-prose';
+import { datumInProse, withProseDatum, withUnitOfAge } from './datum-in-prose';
 import { findTables, type FoundTable } from './find-tables';
 import { columnLetter, type RawSheet, type RawWorkbook } from './grid';
+import { rejoined } from './heading-words';
 import { assembleMapping, type Draft } from './assemble-mapping';
 import type { Mapping, TableProposal } from './mapping';
 import { claimGridMatrix, claimMonthMatrix, gridMatrix } from './matrix';
@@ -71,7 +72,12 @@ function draftsOf(sheet: RawSheet, tables: FoundTable[], file: FileAtHand): Draf
     if (continues) drafts.push({ ...headed, table: continued(sheet, found, headed.table) });
     else
       drafts.push(
-        ...draftsOfTable(sheet, found, span, file).map((draft) => ({ span, general, constants: [], ...draft })),
+        ...draftsOfTable(sheet, found, span, file).map((draft) => ({
+          span,
+          general,
+          constants: [],
+          ...draft,
+        })),
       );
   }
   const beyond = tables[MOST_TABLES];
@@ -138,13 +144,29 @@ function draftOf(sheet: RawSheet, found: FoundTable, span: RowSpan, file: FileAt
 }
 
 /** What the columns of a table are, each by itself: units from the lines above and the datum of the text included. */
-function claimsOf(sheet: RawSheet, found: FoundTable, span: RowSpan, { kind, notesSheets }: FileAtHand): Claim[] {
-  const headings = withColumnNotes(columnHeadings(sheet, found), sheet, span, kind);
+function claimsOf(
+  sheet: RawSheet,
+  found: FoundTable,
+  span: RowSpan,
+  { kind, notesSheets }: FileAtHand,
+): Claim[] {
+  const headings = withColumnNotes(
+    rejoined(columnHeadings(sheet, found), sheet, found, kind),
+    sheet,
+    span,
+    kind,
+  );
   const claims = recogniseColumns(headings, kind, (index) => numberShare(sheet, found, index));
-  return withProseDatum(claimMonthMatrix(claims, kind, sheet, found), datumInProse(sheet, span, notesSheets));
+  const dated = withProseDatum(claims, datumInProse(sheet, span, notesSheets));
+  return claimMonthMatrix(withUnitOfAge(dated), kind, sheet, found);
 }
 
-function settled(sheet: RawSheet, found: FoundTable, own: Claim[], { workbook, kind, notes }: FileAtHand): TableDraft {
+function settled(
+  sheet: RawSheet,
+  found: FoundTable,
+  own: Claim[],
+  { workbook, kind, notes }: FileAtHand,
+): TableDraft {
   const claims = chooseFields(own, kind, sheet, found.headerRows[0] ?? found.firstRow);
   const setAside = reasonToSetAside(sheet, workbook, found.firstRow, notes);
   const unusable = setAside ?? reasonNotUsable(claims, found, kind);
@@ -160,7 +182,13 @@ function turnedDraft(sheet: RawSheet, table: TableProposal, file: FileAtHand): D
   const draft = settled(view.sheet, view.table, claims, file);
   const { used, reason } = draft.table;
   const said = used ? table.reason : `${table.reason} ${reason}`;
-  return { claims: draft.claims, table: { ...table, used, reason: said }, constants: [], span, general: null };
+  return {
+    claims: draft.claims,
+    table: { ...table, used, reason: said },
+    constants: [],
+    span,
+    general: null,
+  };
 }
 
 function numberShare(sheet: RawSheet, { firstRow, lastRow }: FoundTable, index: number): number | undefined {

@@ -94,7 +94,11 @@ function readMonth(text: string, traced: TracedValue): CellReading {
   if (missingCodeOf(text) !== null) return asMissing(text, traced);
   const month = monthOf(text);
   if (month === null)
-    return refused(traced, 'no-month', `"${text.trim()}" is no month; 1 to 12, a name or "annual" is wanted.`);
+    return refused(
+      traced,
+      'no-month',
+      `"${text.trim()}" is no month; 1 to 12, a name or "annual" is wanted.`,
+    );
   traced.rule = month === 'annual' ? 'the mean of the year' : 'number of the month';
   traced.value = month;
   return { value: month, traced };

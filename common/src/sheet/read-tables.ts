@@ -60,7 +60,11 @@ export function readTables<T>(
       options,
     );
     const isBeside = mapping.tables.some((other) => other !== table && overlaps(other, table));
-    readTable({ ...view, isTurned: turned !== null, isBeside, columns, constants, kind, mends }, result, build);
+    readTable(
+      { ...view, isTurned: turned !== null, isBeside, columns, constants, kind, mends },
+      result,
+      build,
+    );
   }
   return result;
 }
@@ -113,7 +117,11 @@ function readTable<T>(reading: TableReading, result: TablesRead<T>, build: (one:
   }
 }
 
-function readMapped({ sheet, isTurned, mends }: TableReading, column: MappedColumn, row: number): CellReading {
+function readMapped(
+  { sheet, isTurned, mends }: TableReading,
+  column: MappedColumn,
+  row: number,
+): CellReading {
   const address = isTurned ? cellAddress(row - 1, column.index + 1) : `${column.letter}${row}`;
   const mended = mends.size === 0 ? undefined : mends.get(`${sheet.name}\u0000${address}`);
   return readCell(sheet.rows[row - 1]?.[column.index] ?? null, address, mended, column.reader);

@@ -95,7 +95,12 @@ function claimOfRecord(heading: ColumnHeading, kind: DatasetKind, share: number 
     return unclaimed(heading, 'No field of this kind is headed so.');
   const age = parseAgeUnit(heading.unit);
   if (!isUnitProblem(age) && age.datum !== null && kind.fields.some(({ field }) => field === 'ageKaBp'))
-    return { heading, field: 'ageKaBp', confidence: 0.6, reason: `Only an age has the unit ${heading.unit}.` };
+    return {
+      heading,
+      field: 'ageKaBp',
+      confidence: 0.6,
+      reason: `Only an age has the unit ${heading.unit}.`,
+    };
   const reason = `A column of numbers with the unit ${heading.unit}.`;
   return { heading, field: value.field, confidence: 0.5, reason, ...named };
 }

@@ -18,7 +18,8 @@ export interface SiteBlock extends ColumnBlock {
 }
 
 /** Words by which blocks are told to be versions of one table, not sites. */
-const VERSION = /revis|correct|version|age (?:scale|model)|time ?scale|(?<!\p{L})(?:old|new|alt|neu)(?!\p{L})|EDC\d|GICC|AICC|SS\d\d/iu;
+const VERSION =
+  /revis|correct|version|age (?:scale|model)|time ?scale|(?<!\p{L})(?:old|new|alt|neu)(?!\p{L})|EDC\d|GICC|AICC|SS\d\d/iu;
 
 /** Parts of a table parted by empty columns, or by the heading of its first column coming again. */
 export function columnBlocks(claims: Claim[]): Claim[][] {
@@ -59,15 +60,26 @@ export function siteBlocks(
     return { ...columns, constants: ownConstants(sheet, columns, span, kind) };
   });
   const names = blocks.map(({ constants }) =>
-    constants.filter(({ field }) => ['site', 'latitudeDeg', 'longitudeDeg'].includes(field)).map(({ text }) => text).join(' '),
+    constants
+      .filter(({ field }) => ['site', 'latitudeDeg', 'longitudeDeg'].includes(field))
+      .map(({ text }) => text)
+      .join(' '),
   );
-  const areSites = names.every((name) => name !== '' && !VERSION.test(name)) && new Set(names).size === names.length;
+  const areSites =
+    names.every((name) => name !== '' && !VERSION.test(name)) && new Set(names).size === names.length;
   return areSites ? blocks : null;
 }
 
 /** What stands above a block in its own columns: labels with values, a position in text, and its title. */
-function ownConstants(sheet: RawSheet, block: ColumnBlock, span: RowSpan, kind: DatasetKind): TableConstant[] {
-  const rows = sheet.rows.slice(0, span.before - 1).map((row) => row.map((cell, c) => (c >= block.first && c <= block.last ? cell : null)));
+function ownConstants(
+  sheet: RawSheet,
+  block: ColumnBlock,
+  span: RowSpan,
+  kind: DatasetKind,
+): TableConstant[] {
+  const rows = sheet.rows
+    .slice(0, span.before - 1)
+    .map((row) => row.map((cell, c) => (c >= block.first && c <= block.last ? cell : null)));
   const stated = constantsAbove({ ...sheet, rows }, span, kind);
   if (stated.some(({ field }) => field === 'site')) return stated;
   const title = titleNearest({ ...sheet, rows }, span, stated);
@@ -82,7 +94,8 @@ function titleNearest(sheet: RawSheet, span: RowSpan, stated: TableConstant[]): 
     if (c < 0 || row.filter(isFilled).length > 1) continue;
     const text = textOf(row[c]).trim();
     const name = text.split(/[,:;(|]/)[0]?.trim() ?? '';
-    if (name === '' || name.length > 40 || /^\d/.test(name) || stated.some((one) => one.text === name)) continue;
+    if (name === '' || name.length > 40 || /^\d/.test(name) || stated.some((one) => one.text === name))
+      continue;
     const cell = cellAddress(c, r + 1);
     const reason = 'The title over its block of columns; change it if the site has another name.';
     return { sheet: sheet.name, field: 'site', text: name, unit: null, cell, reason };

@@ -1,4 +1,4 @@
-import type { DatasetKind } from '../dataset/field';
+import { type DatasetKind, fieldOf } from '../dataset/field';
 import type { Draft } from './assemble-mapping';
 import type { RawSheet, RawWorkbook } from './grid';
 import type { TableConstant } from './mapping';
@@ -23,8 +23,8 @@ export function tableConstants(
     : statedConstants(sheet, draft.span, draft.general, kind);
   const has = (field: string): boolean =>
     mapped.has(field) || offered.some((constant) => constant.field === field);
-  if (!has('site')) {
-    const site = siteName(sheet, draft.span, ['csv', 'tsv', 'txt'].includes(workbook.format));
+  if (!has('site') && fieldOf(kind, 'site')?.required) {
+    const site = nameOf(draft, draft.span, sheet, ['csv', 'tsv', 'txt'].includes(workbook.format), kind);
     if (site) offered.push(site);
   }
   if (notes && !has('latitudeDeg') && !has('longitudeDeg')) {
@@ -44,7 +44,21 @@ export function tableConstants(
     const wavelength = value ? wavelengthConstant(value.heading, draft.table) : null;
     if (wavelength) offered.push(wavelength);
   }
-  return offered.filter((constant) => !mapped.has(constant.field));
+  return offered.filter(({ field }) => !mapped.has(field) && fieldOf(kind, field) !== undefined);
+}
+
+/** The title above the table, unless the position comes from above the first one: then its title names the site. */
+function nameOf(
+  { general }: Draft,
+  span: RowSpan,
+  sheet: RawSheet,
+  isText: boolean,
+  kind: DatasetKind,
+): TableConstant | null {
+  const isPlaced = (rows: RowSpan): boolean =>
+    constantsAbove(sheet, rows, kind).some(({ field }) => field === 'latitudeDeg');
+  const placedAbove = general !== null && isPlaced(general) && !isPlaced(span);
+  return siteName(sheet, placedAbove ? general : span, isText);
 }
 
 /** What stands above the first table of a sheet holds for the later ones too, unless they say otherwise. */

@@ -29,14 +29,21 @@ export function findTurned(sheet: RawSheet, kind: DatasetKind): TableProposal | 
     const row = sheet.rows[r] ?? [];
     const c = row.findIndex(isFilled);
     const field = c < 0 ? undefined : fieldHeaded(textOf(row[c]), known);
-    const fits = field !== undefined && row.slice(c + 1).filter(isFilled).length >= 2 && (run.length === 0 || c === label);
+    const fits =
+      field !== undefined &&
+      row.slice(c + 1).filter(isFilled).length >= 2 &&
+      (run.length === 0 || c === label);
     if (fits) {
       if (run.length === 0) label = c;
       run.push({ row: r + 1, field });
       continue;
     }
     if (c >= 0 && run.length > 0 && isUnknownField(row, c, label)) continue;
-    if (run.length >= FEWEST_FIELDS && run.some((one) => wanted.has(one.field)) && mostlyNumbers(sheet, run, label))
+    if (
+      run.length >= FEWEST_FIELDS &&
+      run.some((one) => wanted.has(one.field)) &&
+      mostlyNumbers(sheet, run, label)
+    )
       return proposalOf(sheet, run[0]!.row, run.at(-1)!.row, label);
     run = [];
   }
@@ -51,7 +58,9 @@ function fieldHeaded(text: string, known: Map<string, string>): string | undefin
 
 /** A row in the middle that begins with a text no field is headed by, beside numbers. */
 const isUnknownField = (row: readonly (RawCell | null)[], c: number, label: number): boolean =>
-  c === label && row[c]?.kind === 'text' && row.slice(c + 1).filter((cell) => isFilled(cell) && isNumberLike(cell)).length >= 2;
+  c === label &&
+  row[c]?.kind === 'text' &&
+  row.slice(c + 1).filter((cell) => isFilled(cell) && isNumberLike(cell)).length >= 2;
 
 /** Rows of a turned table differ in what they hold; a table the right way up has as many headings as columns in one row. */
 function mostlyNumbers(sheet: RawSheet, run: { row: number }[], label: number): boolean {
@@ -90,7 +99,8 @@ export function turnedTable(sheet: RawSheet, table: TableProposal, kind: Dataset
   const width = cut.rows.reduce((most, row) => Math.max(most, row.length), 0);
   const rows = Array.from({ length: width }, (_column, c) => cut.rows.map((row) => row[c] ?? null));
   const units = rows[label + 1]?.filter(isFilled) ?? [];
-  const hasUnits = units.length > 0 && units.filter((cell) => looksLikeUnit(cell.text)).length >= units.length * 0.5;
+  const hasUnits =
+    units.length > 0 && units.filter((cell) => looksLikeUnit(cell.text)).length >= units.length * 0.5;
   const view = { name: sheet.name, rows, columnCount: sheet.rows.length };
   const first = label + (hasUnits ? 3 : 2);
   return {

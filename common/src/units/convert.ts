@@ -160,7 +160,11 @@ const TEMPERATURES: [RegExp, number, number][] = [
 ];
 
 function temperature(unitText: string, wanted: string): Conversion | UnitProblem {
-  const text = unitText.trim().replace(/[º˚]/gu, '°').replace(/^℃$/u, '°C').replace(/^\[(.*)\]$/, '$1');
+  const text = unitText
+    .trim()
+    .replace(/[º˚]/gu, '°')
+    .replace(/^℃$/u, '°C')
+    .replace(/^\[(.*)\]$/, '$1');
   const found = TEMPERATURES.find(([spelling]) => spelling.test(text));
   if (!found) {
     const named = text === '' ? 'No unit is given' : `"${text}" is no unit of a temperature`;
@@ -169,7 +173,8 @@ function temperature(unitText: string, wanted: string): Conversion | UnitProblem
   }
   const [, factor, offset] = found;
   const shift = offset === 0 ? '' : ` + ${Number(offset.toFixed(4))}`;
-  const explanation = factor === 1 && offset === 0 ? 'K, as given' : `${text} × ${Number(factor.toPrecision(7))}${shift} = K`;
+  const explanation =
+    factor === 1 && offset === 0 ? 'K, as given' : `${text} × ${Number(factor.toPrecision(7))}${shift} = K`;
   return { factor, offset, canonical: 'K', explanation, assumptions: [] };
 }
 

@@ -63,9 +63,9 @@ const WORDS: [string, number, Dimension][] = [
   ['rad radian radians', 180 / Math.PI, ANGLE],
   ['% percent Prozent pct porcentaje pourcent', 1e-2, NONE],
   ['‰ permil permille Promille', 1e-3, NONE],
-  ['ppm', 1e-6, NONE],
-  ['ppb', 1e-9, NONE],
-  ['ppt', 1e-12, NONE],
+  ['ppm ppmv', 1e-6, NONE],
+  ['ppb ppbv', 1e-9, NONE],
+  ['ppt pptv', 1e-12, NONE],
   ['fraction unitless dimensionless ratio dimensionslos sans_dimension adimensional', 1, NONE],
 ]; // prettier-ignore
 

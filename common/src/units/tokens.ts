@@ -33,7 +33,7 @@ export function plainUnitText(text: string): string {
     .normalize('NFKC')
     .replace(/µ/gu, 'μ')
     .replace(/[‐-―−]/gu, '-');
-  plain = plain.replace(/per\s?cent\b/gi, '%').replace(/per\s?mille?\b/gi, '‰');
+  plain = plain.replace(/per\s?cent\b/gi, '%').replace(/per\s?mil(?:le?)?\b/gi, '‰');
   plain = plain.replace(/\b(?:wt|vol|mass|gew)\.?[- ]?%/gi, '%').replace(/^x\s*(?=10)/i, '');
   for (const [words, power] of AREA_WORDS) plain = plain.replace(words, power);
   plain = plain.replace(/\\(?:mathrm|text|rm)|[${}\\~]/g, (found) => (found === '~' ? ' ' : ''));

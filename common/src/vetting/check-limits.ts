@@ -25,8 +25,7 @@ export function requireLimits(limits: StewardLimits, rules: readonly Rule[]): vo
 
 function requireKnown(id: string, own: Record<string, number>, defaults: Record<string, number>): void {
   for (const [name, value] of Object.entries(own)) {
-    if (!Object.hasOwn(defaults, name))
-      refuse('no-such-limit', `${id} limit`, name, Object.keys(defaults));
+    if (!Object.hasOwn(defaults, name)) refuse('no-such-limit', `${id} limit`, name, Object.keys(defaults));
     if (!Number.isFinite(value)) refuse('not-a-number', `${id} ${name}`, String(value), 'a finite number');
   }
 }

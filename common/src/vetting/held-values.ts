@@ -50,14 +50,11 @@ export class HeldValues {
 const STEPS = [-1, 0, 1];
 const AROUND = STEPS.flatMap((dy) => STEPS.flatMap((dx) => STEPS.map((dt) => [dy, dx, dt] as const)));
 
-const eastward = (degrees: number): number => ((((degrees % 360) + 540) % 360) + 360) % 360 - 180;
+const eastward = (degrees: number): number => (((((degrees % 360) + 540) % 360) + 360) % 360) - 180;
 
 /** "bulk" and nothing said are the same; spaces and the sign of micro do not matter. */
 const sizeKey = (size: string | null): string =>
-  (size ?? 'bulk')
-    .toLowerCase()
-    .replace(/[\s_]/g, '')
-    .replace(/[µμ]/g, 'u');
+  (size ?? 'bulk').toLowerCase().replace(/[\s_]/g, '').replace(/[µμ]/g, 'u');
 
 /** Held values by core, quantity, size and age as compared exactly: the same sample in another version. */
 export function heldByCore(context: VettingContext): Map<string, HeldSample[]> {

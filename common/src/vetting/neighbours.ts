@@ -80,7 +80,8 @@ function heldPlaces(context: VettingContext): FluxPlace[] {
   return context.heldSites.flatMap((held) => {
     if (names.has(siteKey(held.site))) return [];
     const flux = held.medianFluxGM2Yr ?? 0;
-    const place = held.archive === null || flux <= 0 ? null : placeOf(held, archiveOfText(held.archive), flux);
+    const place =
+      held.archive === null || flux <= 0 ? null : placeOf(held, archiveOfText(held.archive), flux);
     return place ? [place] : [];
   });
 }

@@ -50,7 +50,7 @@ export interface Rule {
   /** default limits a steward may change */
   limits?: Record<string, number>;
   /** kinds of dataset it looks at; the kinds of samples (dust flux, point optical depth) when absent */
-  kinds?: readonly string[];
+  kinds?: readonly string[] | 'all';
   /** a rule that cannot run here says why; it is listed as not run and never pretends */
   notRun?: string;
   check(context: VettingContext): Iterable<RuleHit>;

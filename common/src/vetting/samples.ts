@@ -1,4 +1,6 @@
-import type { SampleRow } from '../dataset/sample-row';
+import type { DatasetKind } from '../dataset/field';
+import { isRecordKind, readableKind } from '../dataset/record-kinds';
+import type { SampleRow, TracedValue } from '../dataset/sample-row';
 import type { Archive } from './archive';
 import type { VettingContext } from './context';
 import { groupBy, numberOf } from './place';
@@ -23,8 +25,9 @@ export const archiveOfText = (text: string): Archive =>
   ARCHIVE_WORDS.find(([, words]) => words.test(text))?.[0] ?? 'other';
 
 /** The field that carries the value a dataset is about. */
-export const valueField = (context: VettingContext): 'fluxGM2Yr' | 'aod' =>
-  context.kind === 'point-optical-depth' ? 'aod' : 'fluxGM2Yr';
+export const valueField = (context: VettingContext): string => kindOf(context).valueField;
+
+export const kindOf = (context: VettingContext): DatasetKind => readableKind(context.kind ?? 'dust-flux');
 
 /** The row's value: flux [g m⁻² yr⁻¹] or optical depth [1]. */
 export const valueOf = (context: VettingContext, row: SampleRow): number | null =>
@@ -36,8 +39,14 @@ export const valueOf = (context: VettingContext, row: SampleRow): number | null 
  * A cell that could not be read is a fault to mend, not a missing value.
  */
 export function isWithoutValue(context: VettingContext, row: SampleRow): boolean {
-  return valueOf(context, row) === null && row.cells[valueField(context)]?.problem === undefined;
+  const kind = kindOf(context);
+  if (isRecordKind(kind))
+    return [kind.valueField, ...(kind.usableWith ?? []).flat()].every((field) => isAbsent(row.cells[field]));
+  return valueOf(context, row) === null && row.cells[kind.valueField]?.problem === undefined;
 }
+
+const isAbsent = (traced: TracedValue | undefined): boolean =>
+  traced === undefined || (traced.value === null && traced.problem === undefined);
 
 /** Rows that would enter a version, or would once their value is mended. */
 export function countedRows(context: VettingContext): SampleRow[] {

@@ -40,8 +40,7 @@ function thinned<T>(cell: T[]): T[] {
   return stride === 1 ? cell : cell.filter((_, index) => index % stride === 0);
 }
 
-const bandOf = (place: Place): number =>
-  Math.min(BANDS - 1, Math.floor((place.latitudeDeg + 90) / BAND_DEG));
+const bandOf = (place: Place): number => Math.min(BANDS - 1, Math.floor((place.latitudeDeg + 90) / BAND_DEG));
 
 /** Cells of a band, each at least as wide as the band is high at its edge nearer to a pole; one for the polar caps. */
 function columnsOf(band: number): number {

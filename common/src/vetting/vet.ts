@@ -40,7 +40,7 @@ export function vet(context: VettingContext, options: VetOptions = {}): Finding[
   const kept = { ...context, rows: context.rows.filter((row) => row.leftOut === undefined) };
   const kind = context.kind ?? 'dust-flux';
   const wanted = (options.rules ?? allRules).filter(
-    (rule) => !rule.notRun && stages.includes(rule.stage) && (rule.kinds ?? SAMPLE_KINDS).includes(kind),
+    (rule) => !rule.notRun && stages.includes(rule.stage) && looksAt(rule, kind),
   );
   const placed = placements(kept, wanted);
   placed.sort(
@@ -49,6 +49,9 @@ export function vet(context: VettingContext, options: VetOptions = {}): Finding[
   const keyOf = keyMaker(kept.rows);
   return placed.map(({ hit, rule: index }) => withRule(wanted[index]!, hit, keyOf));
 }
+
+const looksAt = ({ kinds = SAMPLE_KINDS }: Rule, kind: string): boolean =>
+  kinds === 'all' || kinds.includes(kind);
 
 function withRule(rule: Rule, hit: RuleHit, keyOf: (rule: Rule, hit: RuleHit) => string): Finding {
   return {

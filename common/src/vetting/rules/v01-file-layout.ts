@@ -12,6 +12,7 @@ export const fileLayout: Rule = {
   needs: [],
   source: 'after the practice of W3C CSV on the Web (2015) and Frictionless Table Schema',
   why: 'Several header rows, merged cells and more than one table are usual and harmless once resolved; what was resolved must be visible, or a column is silently lost.',
+  kinds: 'all',
 
   *check({ workbook, mapping, rows }) {
     if (!mapping.tables.some((table) => table.used)) {

@@ -17,6 +17,7 @@ export const spreadsheetCells: Rule = {
   needs: [],
   source: 'common practice, no source: spreadsheets alter values',
   why: 'The stored result of a formula may be out of date, an error value hides a broken reference, and names such as 1-2 are turned into 1 February without a word.',
+  kinds: 'all',
 
   *check(context) {
     const formulas = new Map<string, { sheet: string; field: string; first: string; count: number }>();

@@ -14,6 +14,7 @@ export const unreadableValue: Rule = {
   needs: [],
   source: 'common practice, no source',
   why: 'Decimal commas, thousands separators and units in cells are settled once for a column; what then still does not read as a number would be a guess.',
+  kinds: 'all',
 
   *check(context) {
     const said = new Set<string>();

@@ -13,6 +13,7 @@ export const missingCodes: Rule = {
   needs: [],
   source: 'common practice, no source',
   why: 'A code read as a number ruins every mean, and a code read as missing hides values below detection; the contributor must be able to see which was chosen.',
+  kinds: 'all',
 
   *check(context) {
     const columns = new Map<string, { sheet: string; field: string; codes: Map<string, number> }>();

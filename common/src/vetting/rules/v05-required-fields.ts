@@ -1,8 +1,10 @@
+import { fieldOf } from '../../dataset/field';
+import { isRecordKind } from '../../dataset/record-kinds';
 import type { SampleRow } from '../../dataset/sample-row';
 import type { VettingContext } from '../context';
-import { bySheet, filePlace, numberOf, placeOf, sheetPlace } from '../place';
+import { bySheet, filePlace, numberOf, placeOf, sheetPlace, textOf } from '../place';
 import type { Rule, RuleHit } from '../rule';
-import { archiveOf, isWithoutValue } from '../samples';
+import { archiveOf, isWithoutValue, kindOf } from '../samples';
 import { asked, counted } from '../wording';
 
 interface Wanted {
@@ -38,6 +40,7 @@ export const requiredFields: Rule = {
   needs: [],
   source: 'common practice, no source',
   why: 'Without place, age, value and origin a number can neither be averaged into a slice nor be cited.',
+  kinds: 'all',
 
   *check(context) {
     for (const [sheet, rows] of bySheet(context.rows)) yield* checkSheet(context, sheet, rows);
@@ -47,11 +50,7 @@ export const requiredFields: Rule = {
 };
 
 function* checkSheet(context: VettingContext, sheet: string, rows: SampleRow[]): Iterable<RuleHit> {
-  const value: Wanted =
-    context.kind === 'point-optical-depth'
-      ? { field: 'aod', title: 'optical depth', fields: ['aod'] }
-      : { field: 'fluxGM2Yr', title: 'dust flux', fields: ['fluxGM2Yr'] };
-  const wanted = [...PLACE_AND_TIME, ...(context.kind === 'point-optical-depth' ? [] : [AGE])];
+  const { value, wanted } = wantedOf(context);
   const absent = [...wanted, value].filter((one) => !isOffered(context, sheet, rows, one));
   for (const one of absent) {
     yield {
@@ -76,6 +75,25 @@ function* checkSheet(context: VettingContext, sheet: string, rows: SampleRow[]):
       };
     }
   }
+}
+
+function wantedOf(context: VettingContext): { value: Wanted; wanted: Wanted[] } {
+  const kind = kindOf(context);
+  if (isRecordKind(kind)) {
+    const title = (field: string): string => fieldOf(kind, field)!.title.toLowerCase();
+    const values = [kind.valueField, ...(kind.usableWith ?? []).flat()];
+    const required = kind.fields.filter(({ field, required }) => required && !values.includes(field));
+    return {
+      value: { field: kind.valueField, title: title(kind.valueField), fields: values },
+      wanted: required.map(({ field }) => ({ field, title: title(field), fields: [field] })),
+    };
+  }
+  return context.kind === 'point-optical-depth'
+    ? { value: { field: 'aod', title: 'optical depth', fields: ['aod'] }, wanted: PLACE_AND_TIME }
+    : {
+        value: { field: 'fluxGM2Yr', title: 'dust flux', fields: ['fluxGM2Yr'] },
+        wanted: [...PLACE_AND_TIME, AGE],
+      };
 }
 
 function* noteRowsWithoutValue(
@@ -115,7 +133,7 @@ function* checkForm(context: VettingContext): Iterable<RuleHit> {
     };
   }
   const open = context.rows.some((row) => !isWithoutValue(context, row) && archiveOf(context, row) === null);
-  if (open && context.kind !== 'point-optical-depth') {
+  if (open && (context.kind ?? 'dust-flux') === 'dust-flux') {
     yield {
       ...filePlace('archive'),
       ...asked(context, 'The archive', 'choose ice, marine, loess, lake, peat or other.'),
@@ -134,4 +152,4 @@ function isOffered(context: VettingContext, sheet: string, rows: SampleRow[], { 
 }
 
 const isGiven = (row: SampleRow, field: string): boolean =>
-  field === 'site' ? row.site !== null : numberOf(row, field) !== null;
+  field === 'site' ? row.site !== null : numberOf(row, field) !== null || textOf(row, field) !== null;

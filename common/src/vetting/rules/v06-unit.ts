@@ -18,6 +18,7 @@ export const unit: Rule = {
   needs: [],
   source: 'common practice, no source',
   why: 'Fluxes come in g cm-2 kyr-1, mg m-2 yr-1, kg m-2 s-1 and more, a factor of ten to a million apart; a unit that is guessed is a number that is wrong.',
+  kinds: 'all',
 
   *check(context) {
     const columns = new Map<string, { sheet: string; field: string; why: string; count: number }>();

@@ -14,6 +14,7 @@ export const coordinateRange: Rule = {
   needs: ['latitudeDeg', 'longitudeDeg'],
   source: 'common practice, no source',
   why: 'A position off the globe, or the 0, 0 of an empty form, puts the sample into no region or the wrong one.',
+  kinds: ['dust-flux', 'point-optical-depth', 'gridded-field', 'backdrop-table', 'gas-record'],
 
   *check(context) {
     yield* outside(context, 'latitudeDeg', 'latitude', -90, 90);

@@ -6,7 +6,10 @@ import { precision } from './v40-precision';
 const long = rows({ fluxGM2Yr: 0.0123456789 });
 
 /** The value is converted and has many figures; the text is what counts. */
-const written = (raw: string) => ({ fluxGM2Yr: 0.123456789, cells: { fluxGM2Yr: { raw, value: 0.123456789 } } });
+const written = (raw: string) => ({
+  fluxGM2Yr: 0.123456789,
+  cells: { fluxGM2Yr: { raw, value: 0.123456789 } },
+});
 
 examplesOf(precision, {
   quiet: {

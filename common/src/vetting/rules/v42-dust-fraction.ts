@@ -65,7 +65,8 @@ function* massBalance(context: VettingContext, row: SampleRow): Iterable<RuleHit
     ...placeOf(context, row, largest.field),
     subject: 'sum',
     message: `The parts of row ${row.row} add up to ${shown(sum)} of the mass (${given.map(({ name, share }) => `${name} ${shown(share)}`).join(', ')}); at most ${sumMax} is possible.`,
-    remedy: 'Check that all parts are shares of the same dry mass and type the right values, or leave the row out with a reason.',
+    remedy:
+      'Check that all parts are shares of the same dry mass and type the right values, or leave the row out with a reason.',
     remedyKind: 'mend',
   };
 }

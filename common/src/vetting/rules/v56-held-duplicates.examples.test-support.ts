@@ -28,7 +28,11 @@ examplesOf(heldDuplicates, {
   fires: {
     'two samples are held under another name': {
       context: against({}, {}, { ageKaBp: 21.3 }),
-      first: { severity: 'warning', row: 2, message: expect.stringContaining('2 values of Core A already as "EDC"') },
+      first: {
+        severity: 'warning',
+        row: 2,
+        message: expect.stringContaining('2 values of Core A already as "EDC"'),
+      },
     },
     'the two lie on both sides of the date line': {
       context: against({ longitudeDeg: -179.99 }, { longitudeDeg: 179.99 }),

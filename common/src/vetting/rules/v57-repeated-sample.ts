@@ -50,7 +50,10 @@ function* heldWithOtherValue(context: VettingContext, rows: SampleRow[]): Iterab
     const other = known.find(({ fluxGM2Yr }) => flux !== null && !agree(flux, fluxGM2Yr));
     return other ? [{ row, other }] : [];
   });
-  const groups = groupBy(pairs, ({ row, other }) => `${row.sheet}\u0000${siteKey(row.site!)}\u0000${other.datasetTitle}`);
+  const groups = groupBy(
+    pairs,
+    ({ row, other }) => `${row.sheet}\u0000${siteKey(row.site!)}\u0000${other.datasetTitle}`,
+  );
   for (const group of groups.values()) {
     const { row, other } = group[0]!;
     yield {

@@ -7,10 +7,7 @@ const said = { ...bare, metadata: { ...bare.metadata, method: 'coarse mode of a 
 
 examplesOf(aerosolSpecies, {
   quiet: {
-    'every row names its species': opticalDepth(
-      { aod: 0.1 },
-      { aod: 0.4, aerosolSpecies: 'total' },
-    ),
+    'every row names its species': opticalDepth({ aod: 0.1 }, { aod: 0.4, aerosolSpecies: 'total' }),
     'the method names it': said,
   },
   fires: {

@@ -23,7 +23,12 @@ export const scatteringRange: Rule = {
     for (const row of context.rows) {
       const isDust = /dust|staub|poussi|polvo|mineral/i.test(textOf(row, 'aerosolSpecies') ?? '');
       for (const [field, title, min, max] of [
-        ['singleScatteringAlbedo', 'single-scattering albedo', isDust ? limits.dustAlbedoMin : limits.albedoMin, limits.albedoMax],
+        [
+          'singleScatteringAlbedo',
+          'single-scattering albedo',
+          isDust ? limits.dustAlbedoMin : limits.albedoMin,
+          limits.albedoMax,
+        ],
         ['asymmetry', 'asymmetry parameter', limits.asymmetryMin, limits.asymmetryMax],
       ] as const) {
         const refused = refusedHit(context, row, field, title);

@@ -15,6 +15,7 @@ export const reference: Rule = {
   needs: ['publicationDoi', 'publicationCitation'],
   source: 'form of a DOI: ISO 26324 and the DOI Handbook, from memory',
   why: 'The reference is what a reader follows from a number back to its paper.',
+  kinds: 'all',
 
   *check({ metadata }) {
     const doi = metadata.publicationDoi?.trim() ?? '';

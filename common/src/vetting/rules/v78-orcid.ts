@@ -11,6 +11,7 @@ export const orcid: Rule = {
   needs: ['creators'],
   source: 'ORCID, structure of the identifier; check digit by ISO 7064 MOD 11-2',
   why: 'A mistyped iD credits nobody, or somebody else.',
+  kinds: 'all',
 
   *check({ metadata }) {
     for (const { name, orcid: written } of metadata.creators ?? []) {

@@ -16,6 +16,7 @@ export const licence: Rule = {
   needs: ['licence'],
   source: 'SPDX License List, from memory',
   why: 'Without a licence nobody may reuse the data, and a release takes the strictest licence of its parts.',
+  kinds: 'all',
 
   *check(context) {
     const text = context.metadata.licence?.trim() ?? '';

@@ -17,7 +17,9 @@ examplesOf(differences, {
       first: { severity: 'note', sheet: null, remedyKind: 'none' },
     },
     'an age changed, which leaves the row the same sample': {
-      context: context(rows({ ageKaBp: 20.5, depthM: 3 }, { ageKaBp: 21, depthM: 4 }), { earlierRows: earlier }),
+      context: context(rows({ ageKaBp: 20.5, depthM: 3 }, { ageKaBp: 21, depthM: 4 }), {
+        earlierRows: earlier,
+      }),
       hits: 2,
       first: { message: expect.stringContaining('1 cell changed, 0 rows came and 0 rows went') },
     },

@@ -15,7 +15,7 @@ import { humidMode, humidOptics, type HygroscopicMode } from './water-uptake';
 export type IndexChoice =
   | { readonly kind: 'material'; readonly material: string }
   | { readonly kind: 'typed'; readonly real: number; readonly imaginary: number }
-  | { readonly kind: 'mixture'; readonly rule: MixingRule; readonly parts: readonly MineralPart[] };
+  | { readonly kind: 'mixture'; readonly rule: MixingRule; readonly parts: MineralPart[] };
 
 export interface SpeciesMode extends LognormalMode {
   readonly name: string;
@@ -26,7 +26,7 @@ export interface SpeciesMode extends LognormalMode {
 
 /** Particles of a species as a scientist states them; everything that its computed optics rest on. */
 export interface ParticleDefinition {
-  readonly modes: readonly SpeciesMode[];
+  readonly modes: SpeciesMode[];
   /** hygroscopicity, 0 for what takes up no water */
   readonly kappa: number;
   readonly relativeHumidity: number;

@@ -155,6 +155,14 @@ const setTitle = shortText.max(160).refine((title) => !/^\W*new\W*$/i.test(title
 export const newOpticalSet = opticalSetDraft.extend({ title: setTitle });
 export type NewOpticalSet = z.infer<typeof newOpticalSet>;
 
+/** A set in a list. */
+export const listedOpticalSet = opticalSetView.extend({
+  state: versionState,
+  species: speciesName,
+  basisKind: z.enum(['particles', 'measured', 'bulk']),
+});
+export type ListedOpticalSet = z.infer<typeof listedOpticalSet>;
+
 /** One version of a set with all it rests on. */
 export const opticalSetDetail = opticalSetView.extend({
   state: versionState,

@@ -1,32 +1,15 @@
 import { PARAMETERS } from '@siltlight/common/tables/parameters';
 import type { ShippedObject } from '../versions/shipped-objects';
+import { OPTICAL_SET, type OpticalSetContent, type Span } from './optical-set-content';
+import { readyMadeSets } from './ready-made-objects';
 
-interface Span {
-  low: number;
-  central: number;
-  high: number;
-}
-
-/** Content of an optical set: what is hashed. */
-export interface OpticalSetContent {
-  singleScatteringAlbedo: Span;
-  asymmetry: Span;
-  massExtinctionM2PerG: Span;
-  wavelengthUm: number;
-  sizeCutoff: string;
-  source: string;
-  evidence: string;
-  note: string;
-}
-
-export const OPTICAL_SET = 'optical-set';
-
-/** Bulk values from the parameter table, each with its source; nothing is computed here. */
+/** Bulk values from the parameter table, each with its source, and the ready-made sets. */
 export function shippedOpticalSets(): ShippedObject[] {
   return [
     shipped('dust-broadband', 'Mineral dust, broadband for one-layer formulas', 'omega0-bb-dust-global'),
     shipped('dust-19-soils', 'Mineral dust, mean of 19 soils at 550 nm', 'omega0-dust-19-soils-laboratory'),
     shipped('dust-north-african', 'North African dust at 550 nm', 'omega0-north-african-dust'),
+    ...readyMadeSets(),
   ];
 }
 
@@ -35,6 +18,8 @@ function shipped(slug: string, title: string, albedoId: string): ShippedObject {
   const asymmetry = parameter('g-dust');
   const extinction = parameter('mee-dust-pm20-mix-present');
   const content: OpticalSetContent = {
+    species: 'dust',
+    basis: { kind: 'bulk' },
     singleScatteringAlbedo: span(albedo),
     asymmetry: span(asymmetry),
     massExtinctionM2PerG: span(extinction),

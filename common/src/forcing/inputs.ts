@@ -12,6 +12,8 @@ export const INPUTS = {
   surfaceAlbedo: input('surfaceAlbedo', 'Surface albedo', '', 0, 1),
   transmittance: input('transmittance', 'One-way transmittance above the layer', '', 0, 1),
   cloudFraction: input('cloudFraction', 'Cloud fraction', '', 0, 1),
+  cloudAlbedo: input('cloudAlbedo', 'Albedo of cloud tops', '', 0, 1),
+  fractionAboveCloud: input('fractionAboveCloud', 'Share of the layer above cloud', '', 0, 1),
   highCloudFraction: input('highCloudFraction', 'High cloud fraction', '', 0, 1),
   cosSolarZenith: input('cosSolarZenith', 'Cosine of the solar zenith angle', '', MIN_COS_ZENITH, 1),
   insolationWm2: input('insolationWm2', 'Mean insolation at the top of the atmosphere', 'W m⁻²', 0, 10_000),

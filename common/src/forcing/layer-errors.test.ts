@@ -3,9 +3,12 @@ import type { CsvRow } from '../../../reference/read';
 import { checkTable, numberIn } from '../../test/check-table';
 import { upscatterAt, upscatterMean } from '../optics/upscatter';
 import { quantile } from '../statistics/quantile';
+import { addingDoubling, henyeyGreensteinMoments } from './adding-doubling-scheme';
+import { doublingSolver } from './adding-doubling';
 import { coakleyChylek } from './coakley-chylek';
 import { albedoChange } from './lambertian-surface';
 import type { LayerFluxes, LayerScheme } from './layer-scheme';
+import { scatteringAngles } from './scattering-angles';
 import { twoStreamScheme } from './two-stream-scheme';
 
 const ALBEDOS = [0, 0.1, 0.3, 0.6, 0.85];
@@ -69,11 +72,16 @@ function expectSummary(name: string, method: string, tau: number, { percents, la
   expect(Math.abs(largest / numberIn(row, 'max_abs_err_delta_albedo') - 1), label).toBeLessThan(0.006);
 }
 
-const meanOf = (scheme: LayerScheme) => (row: CsvRow, albedo: number) => {
-  const [tau, omega, g] = read(row);
-  const { diffuse } = scheme.prepare(g, new Float64Array())(tau, omega);
-  return albedoChange(diffuse.reflectance, diffuse.transmittance, diffuse, albedo);
-};
+/** Albedo change of a row by a scheme under isotropic light; each row is solved once for all surfaces. */
+function meanOf(scheme: LayerScheme) {
+  const known = new Map<CsvRow, LayerFluxes>();
+  return (row: CsvRow, albedo: number) => {
+    const [tau, omega, g] = read(row);
+    if (!known.has(row)) known.set(row, { ...scheme.prepare(g, new Float64Array())(tau, omega).diffuse });
+    const diffuse = known.get(row)!;
+    return albedoChange(diffuse.reflectance, diffuse.transmittance, diffuse, albedo);
+  };
+}
 
 test('mean over the sunlit hemisphere: slanted layer and delta-Eddington have the errors stated of them', () => {
   const rows = checkTable('optics/rt_exact_diffuse.csv');
@@ -111,6 +119,37 @@ test('single sun angles: slanted layer with exact diffuse terms and delta-Edding
       expectSummary(name, WITH_EXACT_DIFFUSE, tau, slanted);
       const eddington = errorsOf(rows, tau, suns[0]!, changeBy(twoStreamScheme('delta-eddington'), false));
       expectSummary(name, 'delta-Eddington', tau, eddington);
+    }
+  }
+});
+
+// The bound of the method, at every exact row: 0.2 % of the magnitudes of the thin-layer terms.
+test('multi-stream stays within 0.2 % of the exact mean albedo change at every row', () => {
+  const rows = checkTable('optics/rt_exact_diffuse.csv');
+  for (const tau of TAUS) {
+    const { percents } = errorsOf(rows, tau, null, meanOf(addingDoubling));
+    expect(percents.length).toBe(120);
+    expect(Math.max(...percents), `τ ${tau}`).toBeLessThan(0.2);
+  }
+});
+
+test('three times the streams move a layer of τ 0.003 by less than 0.2 %, and one of τ 0.001 by less than 1e-6', () => {
+  const suns = Float64Array.of(0.03, 0.1, 0.3, 1);
+  for (const g of [0.3, 0.6, 0.7]) {
+    const usual = addingDoubling.prepare(g, suns);
+    const fine = doublingSolver(scatteringAngles(henyeyGreensteinMoments(g, 48), suns));
+    for (const tau of [0.001, 0.003]) {
+      const [one, other] = [usual(tau, 0.9), fine(tau, 0.9)];
+      suns.forEach((mu, i) => {
+        for (const albedo of ALBEDOS) {
+          const [a, b] = [one, other].map(({ reflectances, transmittances, diffuse }) =>
+            albedoChange(reflectances[i]!, transmittances[i]!, diffuse, albedo),
+          ) as [number, number];
+          const label = `g ${g}, τ ${tau}, μ₀ ${mu}, R_s ${albedo}`;
+          expect(Math.abs(a - b) / thinLayerTerms(tau, 0.9, g, albedo, mu), label).toBeLessThan(2e-3);
+          if (tau < 0.003) expect(mu * Math.abs(a - b), label).toBeLessThan(1e-6);
+        }
+      });
     }
   }
 });

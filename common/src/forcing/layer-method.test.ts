@@ -206,6 +206,22 @@ test('over four orders of magnitude of burden multi-stream saturates, and the th
   expect(codes(thin(10))).toContain('thin-layer-far-beyond-range');
 });
 
+test('above bright cloud absorbing dust warms; the option is off by default and wants both of its inputs', () => {
+  const cloud = { cloudFraction: 0.6, singleScatteringAlbedo: 0.9 };
+  for (const { evaluate } of METHODS) {
+    const off = evaluate({ ...dust, ...cloud }).shortwaveWm2;
+    const on = (cloudAlbedo: number, fractionAboveCloud: number) =>
+      evaluate({ ...dust, ...cloud, cloudAlbedo, fractionAboveCloud });
+    expect(on(0.7, 0).shortwaveWm2).toBe(off);
+    expect(on(0.7, 0.5).shortwaveWm2).toBeGreaterThan(off);
+    expect(on(0.7, 0.5).cautions.map(({ code }) => code)).toContain('layer-above-cloud');
+    // A cloud as dark as the ground, with all of the layer above it, is no cloud.
+    const clear = evaluate({ ...dust, ...cloud, cloudFraction: 0 }).shortwaveWm2;
+    expect(on(dust.surfaceAlbedo, 1).shortwaveWm2).toBeCloseTo(clear, 10);
+    expect(() => evaluate({ ...dust, cloudAlbedo: 0.5 })).toThrow(/fractionAboveCloud is missing/);
+  }
+});
+
 test('the sun is told in one of three ways, and pieces of another are refused by name', () => {
   const evaluate = (change: object) => () => slantedLayer.evaluate({ ...dust, ...change });
   expect(evaluate({ cosSolarZenith: 0.5 })).toThrow(/insolationWm2 is missing/);

@@ -1,5 +1,6 @@
 import type { Caution } from '../physical/domain-error';
 import { upscatterMean } from '../optics/upscatter';
+import { aboveCloudForcing, ABOVE_CLOUD_FIELDS, type AboveCloudInput } from './above-cloud';
 import { criticalSingleScatteringAlbedo } from './critical-albedo';
 import { criticalOfBracket } from './first-order-layer';
 import { declare, readInputs } from './inputs';
@@ -10,7 +11,7 @@ import { result, type ForcingMethod, type ForcingResult, type MethodInput } from
 import { firstOrderMeans, readSunAngles, SUN_FIELDS, type SunAngles, type SunInput } from './sun-angles';
 import { surfaceCautions } from './thin-layer-cautions';
 
-export interface LayerMethodInput extends SunInput {
+export interface LayerMethodInput extends SunInput, AboveCloudInput {
   transmittance: number;
   cloudFraction: number;
   surfaceAlbedo: number;
@@ -41,6 +42,7 @@ export const LAYER_INPUTS: readonly MethodInput[] = [
     'solarLongitudeDeg',
     'solarConstantWm2',
     'daylightFraction',
+    ...ABOVE_CLOUD_FIELDS,
   ]).map((field) => ({ ...field, required: false })),
 ];
 
@@ -48,7 +50,7 @@ export const LAYER_OTHER_INPUTS: readonly string[] = ['ageKaBp', 'orbit', 'longw
 
 /**
  * Forcing by a layer scheme: layer over Lambertian surface minus the bare surface, in the clear part of the sky, seen
- * through the air above: ΔF = −T² (1−A_c) ⟨F ΔA⟩. The critical single-scattering albedo answered is that of first order
+ * through the air above: ΔF = −T² (1−A_c) ⟨F ΔA⟩, and on demand above cloud. The critical single-scattering albedo answered is that of first order
  * in τ, for the same sun angles; that of a thick layer lies elsewhere.
  *
  * @param others names of inputs the scheme's choice has used
@@ -61,24 +63,24 @@ export function evaluateLayer(
   others: readonly string[],
   ownCautions: (state: LayerState, sun: SunAngles) => Caution[],
 ): ForcingResult {
-  const given = readInputs(input, NAMES, [...SUN_FIELDS, 'longwave', ...others]);
+  const given = readInputs(input, NAMES, [...SUN_FIELDS, ...ABOVE_CLOUD_FIELDS, 'longwave', ...others]);
   const { sun, cautions } = readSunAngles(input);
   const longwave = longwaveTerm(input, given.opticalDepth);
   const lit = sun.hemisphericWm2 > 0 || sun.fluxesWm2.some((flux) => flux > 0);
   if (!lit) return result(0, longwave, null, cautions);
   const critical = criticalOf(given, sun);
   if (given.opticalDepth === 0) return result(0, longwave, critical, cautions);
-  const solved = scheme.prepare(given.asymmetry, sun.cosines)(
-    given.opticalDepth,
-    given.singleScatteringAlbedo,
-  );
-  const seen = given.transmittance ** 2 * (1 - given.cloudFraction);
-  const shortwaveWm2 = seen * layerForcing(sun, solved, given.surfaceAlbedo);
+  const solve = scheme.prepare(given.asymmetry, sun.cosines);
+  const cloudy = aboveCloudForcing(input, given, sun, solve);
+  const solved = solve(given.opticalDepth, given.singleScatteringAlbedo);
+  const clearWm2 = (1 - given.cloudFraction) * layerForcing(sun, solved, given.surfaceAlbedo);
+  const shortwaveWm2 = given.transmittance ** 2 * (clearWm2 + cloudy.shortwaveWm2);
   return result(shortwaveWm2, longwave, critical, [
     ...cautions,
     ...ownCautions(given, sun),
     ...surfaceCautions({ ...given, upscatterFraction: upscatterMean(given.asymmetry) }),
     ...negativeReflectance(solved),
+    ...cloudy.cautions,
   ]);
 }
 
@@ -89,10 +91,12 @@ function criticalOf({ surfaceAlbedo, asymmetry }: LayerState, sun: SunAngles): n
   return criticalOfBracket(surfaceAlbedo, upscatter, mean, meanMu);
 }
 
+const ROUNDING = 1e-10;
+
 /** A closure may reflect less than nothing; the value is answered as it is. */
 export function negativeReflectance({ reflectances, diffuse }: SolvedLayer): Caution[] {
   const lowest = Math.min(diffuse.reflectance, ...reflectances);
-  if (lowest >= 0) return [];
+  if (lowest > -ROUNDING) return [];
   return [
     {
       code: 'negative-reflectance',

@@ -67,6 +67,8 @@ export const requestSchemas = {
         'upscatterFraction',
         'asymmetry',
         'cosSolarZenith',
+        'cloudAlbedo',
+        'fractionAboveCloud',
         'latitudeDeg',
         'ageKaBp',
       ),

@@ -1,6 +1,5 @@
 import { albedoChange } from './lambertian-surface';
-import type { SolvedLayer } from './layer-scheme';
-import type { LayerSolver } from './layer-scheme';
+import type { LayerSolver, SolvedLayer } from './layer-scheme';
 import type { SunAngles } from './sun-angles';
 
 /**

@@ -48,8 +48,8 @@ test('a demo person picked by name fills in the e-mail', async () => {
 });
 
 const desks = [
-  { who: 'scientist', headline: /came back with questions|wait/, sections: 6, sees: 'My submissions' },
-  { who: 'steward', headline: /submissions? waits?/, sections: 6, sees: 'Queue' },
+  { who: 'scientist', headline: /came back with questions|wait/, sections: 6, sees: 'Latest published' },
+  { who: 'steward', headline: /submissions? waits?/, sections: 6, sees: 'To vet' },
   { who: 'modeller', headline: /Nothing waits for you/, sections: 5, sees: 'Latest published' },
   { who: 'administrator', headline: /Nothing waits for you/, sections: 5, sees: 'Latest published' },
 ] as const;
@@ -95,7 +95,7 @@ test('arrow keys walk down the column, and Enter puts the slice in the address',
   const third = await beds.nth(3).getAttribute('href');
   await page.keyboard.press('Enter');
   await page.waitForURL(product.url + third!);
-  expect(await beds.nth(3).getAttribute('aria-current')).toBe('true');
+  await expect.poll(() => beds.nth(3).getAttribute('aria-current')).toBe('true');
   await page.getByRole('button', { name: 'Open the column' }).click();
   await page.reload();
   await page.getByRole('button', { name: 'Close the column' }).waitFor();

@@ -1,4 +1,5 @@
-import { expect } from 'vitest';
+import path from 'node:path';
+import { expect, onTestFailed } from 'vitest';
 import type { Browser, BrowserContext, BrowserContextOptions, Page } from 'playwright-core';
 import type { Product } from './product';
 
@@ -17,6 +18,8 @@ export type Visit = {
   leave: () => Promise<void>;
 };
 
+/** Pictures for people to look at; never part of the project's history. */
+export const outputDir = path.join(import.meta.dirname, 'output');
 export const wide = { width: 1440, height: 900 };
 export const narrow = { width: 390, height: 844 };
 
@@ -48,6 +51,9 @@ export async function visit(
     wrong.push(`console: ${message.text()} (${url})`);
   });
   const page = await context.newPage();
+  onTestFailed(async ({ task }) => {
+    if (!page.isClosed()) await page.screenshot({ path: path.join(outputDir, `failed-${task.id}.png`) });
+  });
   return {
     context,
     page,

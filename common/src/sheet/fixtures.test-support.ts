@@ -1,4 +1,3 @@
-/* eslint-disable no-restricted-imports -- for tests only: it reads the samples from the disk and never ships */
 import { readFileSync } from 'node:fs';
 import * as path from 'node:path';
 import * as xlsx from 'xlsx';

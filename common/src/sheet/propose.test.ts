@@ -1,8 +1,10 @@
 import * as fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { datasetKind } from '../dataset/kinds';
+import { DATASET_KINDS, datasetKind } from '../dataset/kinds';
+import { isRecordKind, RECORD_KINDS } from '../dataset/record-kinds';
 import { sampleText, sampleWorkbook, sheetOfValues, textWorkbook } from './fixtures.test-support';
 import type { RawSheet, RawWorkbook } from './grid';
+import { normaliseRecords } from './normalise-records';
 import { normaliseWorkbook } from './normalise';
 import { proposeWorkbook } from './propose';
 
@@ -284,6 +286,12 @@ test('whatever a sheet holds, proposing and reading neither throw nor give a num
     '#',
     '2σ',
     '=1/0',
+    'Lon',
+    'Jan',
+    'k',
+    'CO2 (ppm)',
+    'All ages are b2k.',
+    'Column 1: age (ka BP)',
   );
   const value = fc.oneof(
     word,
@@ -293,11 +301,13 @@ test('whatever a sheet holds, proposing and reading neither throw nor give a num
   );
   const grid = fc.array(fc.array(value, { maxLength: 6 }), { maxLength: 14 });
   fc.assert(
-    fc.property(grid, fc.constantFrom('dust-flux', 'point-optical-depth'), (rows, id) => {
+    fc.property(grid, fc.constantFrom(...[...DATASET_KINDS, ...RECORD_KINDS]), (rows, kind) => {
       const workbook = book(sheetOfValues('Any', rows));
-      const kind = datasetKind(id);
-      const { rows: samples } = normaliseWorkbook(workbook, kind, proposeWorkbook(workbook, kind));
-      const numbers = samples.flatMap((one) => Object.values(one)).filter((one) => typeof one === 'number');
+      const mapping = proposeWorkbook(workbook, kind);
+      const read: object[] = isRecordKind(kind)
+        ? normaliseRecords(workbook, kind, mapping).rows
+        : normaliseWorkbook(workbook, kind, mapping).rows;
+      const numbers = read.flatMap((one) => Object.values(one)).filter((one) => typeof one === 'number');
       expect(numbers.every(Number.isFinite)).toBe(true);
     }),
     { numRuns: 300 },

@@ -56,11 +56,13 @@ interface FileAtHand {
 
 function draftsOf(sheet: RawSheet, tables: FoundTable[], file: FileAtHand): Draft[] {
   const turned = findTurned(sheet, file.kind);
-  if (turned) return [turnedDraft(sheet, turned, file)];
-  if (tables.length === 0)
+  const upright = turned
+    ? tables.filter(({ firstRow, lastRow }) => lastRow < turned.firstRow || firstRow > turned.lastRow)
+    : tables;
+  if (!turned && tables.length === 0)
     return [{ table: notesOnly(sheet), claims: [], constants: [], span: null, general: null }];
-  const drafts: Draft[] = [];
-  for (const found of tables.slice(0, MOST_TABLES)) {
+  const drafts: Draft[] = turned ? [turnedDraft(sheet, turned, file)] : [];
+  for (const found of upright.slice(0, MOST_TABLES)) {
     const headed = drafts.at(-1);
     const span = {
       from: headed === undefined ? 1 : headed.table.lastRow + 1,
@@ -80,7 +82,7 @@ function draftsOf(sheet: RawSheet, tables: FoundTable[], file: FileAtHand): Draf
         })),
       );
   }
-  const beyond = tables[MOST_TABLES];
+  const beyond = upright[MOST_TABLES];
   if (beyond)
     drafts.push({ table: notRead(sheet, beyond), claims: [], constants: [], span: null, general: null });
   return drafts;

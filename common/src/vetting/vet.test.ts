@@ -1,7 +1,8 @@
 import fc from 'fast-check';
 import { expect, test } from 'vitest';
 import { answers, context, row, rows, unreadable } from './rules/rows.test-support';
-import type { SubmissionMetadata, VettingContext } from './context';
+import type { SubmissionMetadata } from './context';
+import { neighbouredSites } from './neighbours';
 import { rules } from './rules/index';
 import { counts, vet } from './vet';
 
@@ -118,29 +119,22 @@ test('no rule breaks on odd numbers and texts', () => {
   );
 });
 
-test('the time for distinct sites grows with their number and not with its square, in whatever way they lie', () => {
-  // Four times the sites: 4 when linear, 16 when quadratic; 10 leaves room for a busy machine.
-  const made = (n: number, widthDeg: number) =>
-    context(
-      Array.from({ length: n }, (_, i) =>
-        row({
-          row: i + 2,
-          site: `Site ${i}`,
-          latitudeDeg: widthDeg * ((i * 0.618034) % 1) - widthDeg / 2,
-          longitudeDeg: 2 * widthDeg * ((i * 0.754877) % 1) - widthDeg,
-        }),
-      ),
-      { workbook: { fileName: 'sites.csv', format: 'csv', sheets: [], readNotes: [] } },
+test('a site is compared with a bounded number of others, however many there are and in whatever way they lie', () => {
+  const widths = [170, 1, 0];
+  for (const widthDeg of widths) {
+    const made = Array.from({ length: 3000 }, (_, i) =>
+      row({
+        row: i + 2,
+        site: `Site ${i}`,
+        latitudeDeg: widthDeg * ((i * 0.618034) % 1) - widthDeg / 2,
+        longitudeDeg: 2 * widthDeg * ((i * 0.754877) % 1) - widthDeg,
+      }),
     );
-  const seconds = (samples: VettingContext) => {
-    const start = performance.now();
-    vet(samples, { rules: wide });
-    return performance.now() - start;
-  };
-  const wide = rules.filter(({ id }) => ['V10', 'V11', 'V12', 'V15', 'V57', 'V58', 'V59'].includes(id));
-  for (const widthDeg of [170, 0]) {
-    seconds(made(300, widthDeg));
-    const least = (n: number) => Math.min(seconds(made(n, widthDeg)), seconds(made(n, widthDeg)));
-    expect(least(4000) / least(1000), `${widthDeg}°`).toBeLessThan(10);
+    const workbook = { fileName: 'sites.csv', format: 'csv' as const, sheets: [], readNotes: [] };
+    const counts = neighbouredSites(context(made, { workbook }), 1000).map(({ count }) => count);
+    expect(counts).toHaveLength(3000);
+    // Sixteen sites of each of nine cells; in one spot the cell of the spot alone.
+    expect(Math.max(...counts), `${widthDeg}°`).toBeLessThanOrEqual(9 * 16);
+    expect(Math.max(...counts), `${widthDeg}°`).toBeGreaterThanOrEqual(14);
   }
 });

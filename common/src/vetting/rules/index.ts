@@ -57,6 +57,9 @@ import { angstromExponent } from './v64-angstrom-exponent';
 import { aerosolSpecies } from './v65-aerosol-species';
 import { humidityState } from './v66-humidity-state';
 import { scatteringRange } from './v69-scattering-range';
+import { months } from './v70-months';
+import { days } from './v71-days';
+import { cloudScreening } from './v72-cloud-screening';
 import { reference } from './v77-reference';
 import { orcid } from './v78-orcid';
 import { licence } from './v79-licence';
@@ -120,6 +123,9 @@ const runRules: Rule[] = [
   aerosolSpecies,
   humidityState,
   scatteringRange,
+  months,
+  days,
+  cloudScreening,
   reference,
   orcid,
   licence,

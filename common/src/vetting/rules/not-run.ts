@@ -1,8 +1,6 @@
 import type { Rule, Severity, Stage } from '../rule';
 
 const FIELD = 'Runs when a field is built from dataset versions: it needs the bounds of a time slice.';
-const NO_AOD_TIME =
-  'Not run: optical depths are submitted without months, days or product levels in columns of their own.';
 
 /**
  * Rules of field practice that cannot run on a submission, each with its reason. They are listed so that the
@@ -70,21 +68,6 @@ export const notRunRules: Rule[] = [
     needs: ['aod', 'fluxGM2Yr'],
     why: 'Deposition times lifetime times extinction efficiency closes the chain within a factor of five.',
     notRun: 'Runs when a field is built that holds both optical depth and deposition.',
-  }),
-  later('V70', 'months', 'Annual mean from fewer than nine months', 'warning', 'submission', {
-    needs: ['date'],
-    why: 'Dust is seasonal: half a year may hold nearly all or hardly any of it.',
-    notRun: NO_AOD_TIME,
-  }),
-  later('V71', 'days', 'Monthly mean from too few days', 'warning', 'submission', {
-    needs: ['sampleCount'],
-    why: 'A few clear days do not stand for a month.',
-    notRun: NO_AOD_TIME,
-  }),
-  later('V72', 'cloud-screening', 'Product level or cloud screening not stated', 'warning', 'submission', {
-    needs: ['method'],
-    why: 'Thin cirrus looks like coarse dust.',
-    notRun: NO_AOD_TIME,
   }),
   later('V73', 'bright-surface', 'Retrieval over bright ground without algorithm', 'warning', 'submission', {
     needs: ['method'],

@@ -5,10 +5,13 @@ import { isUnitProblem } from '../units/unit';
 import { fluxQuantityOf, isDustProxy } from './flux-quantity';
 import { DATASET_KINDS, datasetKind } from './kinds';
 import { METADATA_FORM } from './metadata-form';
+import { readableKind, RECORD_KINDS } from './record-kinds';
+
+const KINDS = [...DATASET_KINDS, ...RECORD_KINDS];
 
 describe('declarations of dataset kinds', () => {
   test('every field converts its own canonical unit, and required fields can be found by a heading', () => {
-    for (const field of DATASET_KINDS.flatMap((kind) => kind.fields)) {
+    for (const field of KINDS.flatMap((kind) => kind.fields)) {
       expect(field.headings.length, field.field).toBeGreaterThan(0);
       if (!(field.quantity in UNIT_KINDS)) continue;
       const conversion = convertTo(field.quantity as keyof typeof UNIT_KINDS, field.canonicalUnit);
@@ -17,7 +20,7 @@ describe('declarations of dataset kinds', () => {
   });
 
   test('within a kind no field and no heading is declared twice', () => {
-    for (const kind of DATASET_KINDS) {
+    for (const kind of KINDS) {
       const fields = kind.fields.map((field) => field.field);
       expect(new Set(fields).size).toBe(fields.length);
       const headings = kind.fields.flatMap((field) => field.headings);
@@ -29,18 +32,21 @@ describe('declarations of dataset kinds', () => {
   });
 
   test('headings are declared as they are compared: lower case, without accents and punctuation', () => {
-    for (const heading of DATASET_KINDS.flatMap((kind) => kind.fields.flatMap((field) => field.headings))) {
+    for (const heading of KINDS.flatMap((kind) => kind.fields.flatMap((field) => field.headings))) {
       expect(heading).toMatch(/^[\p{Ll}\d]+( [\p{Ll}\d]+)*$/u);
     }
   });
 
   test('value and sigma fields are declared, and an unknown kind is refused by name', () => {
-    for (const kind of DATASET_KINDS) {
+    for (const kind of KINDS) {
       for (const name of [kind.valueField, kind.sigmaField])
         expect(kind.fields.some((field) => field.field === name)).toBe(true);
     }
     expect(() => datasetKind('pollen')).toThrow(DomainError);
     expect(datasetKind('dust-flux').valueField).toBe('fluxGM2Yr');
+    expect(() => datasetKind('gas-record')).toThrow(DomainError);
+    expect(readableKind('gas-record').valueField).toBe('co2Ppm');
+    expect(() => readableKind('pollen')).toThrow(DomainError);
   });
 
   test('patterns of the metadata form accept what they name and refuse what they do not', () => {

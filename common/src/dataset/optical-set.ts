@@ -41,7 +41,7 @@ export const opticalSet: DatasetKind = {
     ...(
       [
         ['singleScatteringAlbedoSigma', 'single-scattering albedo', ['ssa error', 'ssa sigma', 'ssa uncertainty'], '1', 'dimensionless'],
-        ['asymmetrySigma', 'asymmetry parameter', ['g error', 'asymmetry error', 'asymmetry uncertainty'], '1', 'dimensionless'],
+        ['asymmetrySigma', 'asymmetry parameter', ['asymmetry error', 'g error', 'asymmetry uncertainty'], '1', 'dimensionless'],
         ['massExtinctionSigmaM2G', 'mass extinction efficiency', ['mee error', 'mee sigma', 'mee uncertainty'], 'm2 g-1', 'massExtinction'],
       ] as const
     ).map(([field, of, headings, canonicalUnit, quantity]) => ({

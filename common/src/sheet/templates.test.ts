@@ -1,12 +1,17 @@
 import { expect, test } from 'vitest';
 import { DATASET_KINDS } from '../dataset/kinds';
+import { isRecordKind, RECORD_KINDS } from '../dataset/record-kinds';
+import type { TracedValue } from '../dataset/sample-row';
 import { DomainError } from '../physical/domain-error';
 import { textWorkbook } from './fixtures.test-support';
+import { normaliseRecords } from './normalise-records';
 import { normaliseWorkbook } from './normalise';
 import { proposeWorkbook } from './propose';
 import { templateFor } from './templates';
 
-test.each(DATASET_KINDS.map((kind) => [kind.id, kind] as const))(
+const KINDS = [...DATASET_KINDS, ...RECORD_KINDS];
+
+test.each(KINDS.map((kind) => [kind.id, kind] as const))(
   'the template for %s is read back with every column recognised',
   (_id, kind) => {
     const { rows } = templateFor(kind);
@@ -20,7 +25,9 @@ test.each(DATASET_KINDS.map((kind) => [kind.id, kind] as const))(
       lastRow: 4,
     });
     expect(mapping.columns.filter((column) => column.field === null)).toEqual([]);
-    const { rows: samples } = normaliseWorkbook(workbook, kind, mapping);
+    const samples: { cells: Record<string, TracedValue> }[] = isRecordKind(kind)
+      ? normaliseRecords(workbook, kind, mapping).rows
+      : normaliseWorkbook(workbook, kind, mapping).rows;
     expect(samples.length).toBe(2);
     expect(samples[0]!.cells[kind.valueField]?.value).toBeGreaterThan(0);
     expect(samples.flatMap((sample) => Object.values(sample.cells).filter((cell) => cell.problem))).toEqual(
@@ -30,7 +37,7 @@ test.each(DATASET_KINDS.map((kind) => [kind.id, kind] as const))(
 );
 
 test('every field of a kind can stand in a template and is recognised by its own heading', () => {
-  for (const kind of DATASET_KINDS) {
+  for (const kind of KINDS) {
     const wanted = kind.fields.map((field) => field.field);
     const { rows, notes } = templateFor(kind, wanted);
     expect(notes.length).toBe(wanted.length);

@@ -1,4 +1,5 @@
 import type { DatasetKind, FieldDeclaration } from '../dataset/field';
+import { isRecordKind } from '../dataset/record-kinds';
 import { DomainError } from '../physical/domain-error';
 
 /** Spelling of units in templates where the canonical one would not be plain to a contributor. */
@@ -16,6 +17,25 @@ const EXAMPLES: Record<string, [string, string]> = {
   aodSigma: ['0.02', '0.02'],
   wavelengthNm: ['550', '550'],
   remark: ['example: delete this row', 'example: delete this row'],
+  region: ['EXAMPLE', 'EXAMPLE'],
+  event: ['Example event', 'Example event'],
+  material: ['Example mineral', 'Example mineral'],
+  month: ['1', '2'],
+  gridValue: ['1.25', '1.5'],
+  surfaceAlbedo: ['0.25', '0.35'],
+  cloudFraction: ['0.55', '0.65'],
+  temperatureK: ['281.5', '282.5'],
+  realPart: ['1.55', '1.56'],
+  imaginaryPart: ['0.0015', '0.0025'],
+  massExtinctionM2G: ['0.65', '0.55'],
+  singleScatteringAlbedo: ['0.95', '0.96'],
+  asymmetry: ['0.72', '0.71'],
+  co2Ppm: ['212.5', '213.5'],
+  co2SigmaPpm: ['1.5', '1.5'],
+  ch4Ppb: ['412.5', '413.5'],
+  n2oPpb: ['212.5', '213.5'],
+  seriesValue: ['4.25', '4.35'],
+  seriesSigma: ['0.05', '0.05'],
 };
 
 export interface Template {
@@ -54,15 +74,29 @@ export function templateFor(kind: DatasetKind, wanted: string[] = usualFields(ki
   };
 }
 
-const usualFields = (kind: DatasetKind): string[] =>
-  kind.fields
-    .filter(
-      (field) =>
-        field.required ||
-        field.field in EXAMPLES ||
-        ['ageSigmaKa', 'depthTopM', 'depthBaseM', 'elevationM'].includes(field.field),
-    )
-    .map((field) => field.field);
+/** Fields wanted of most files beside those that are required or hold the values. */
+const USUAL = new Set([
+  ...[
+    'site',
+    'latitudeDeg',
+    'longitudeDeg',
+    'elevationM',
+    'wavelengthNm',
+    'remark',
+    'region',
+    'month',
+    'material',
+  ],
+  ...['ageKaBp', 'ageSigmaKa', 'depthTopM', 'depthBaseM', 'event'],
+]);
+
+function usualFields(kind: DatasetKind): string[] {
+  const values = new Set([kind.valueField, kind.sigmaField]);
+  if (isRecordKind(kind)) for (const field of (kind.usableWith ?? []).flat()) values.add(field);
+  return kind.fields
+    .filter(({ field, required }) => required || USUAL.has(field) || (values.has(field) && field in EXAMPLES))
+    .map(({ field }) => field);
+}
 
 /** The first synonym, which recognition takes as certain. */
 const headingOf = (field: FieldDeclaration): string => {

@@ -70,6 +70,14 @@ describe('units as people type them', () => {
     ['angle', '°', 1],
     ['wavelength', 'µm', 1000],
     ['duration', 'Ma', 1000],
+    ['massExtinction', 'm2/kg', 1e-3],
+    ['moleFractionPpm', 'ppmv', 1],
+    ['moleFractionPpm', 'µmol/mol', 1],
+    ['moleFractionPpm', 'ppb', 1e-3],
+    ['moleFractionPpb', 'nmol mol-1', 1],
+    ['moleFractionPpb', 'ppm by volume', 1000],
+    ['temperature', 'K', 1],
+    ['temperature', '°F', 5 / 9],
   ] as [UnitKind, string, number][])('as %s, %s has the factor %d', (kind, text, factor) => {
     expect(factorOf(kind, text) / factor).toBeCloseTo(1, 12);
   });
@@ -91,6 +99,17 @@ describe('units as people type them', () => {
       expect(result.message).toContain('wanted');
     },
   );
+
+  test('temperatures meet at the fixed points: 0 °C and 32 °F are 273.15 K, −40 °C is −40 °F', () => {
+    const kelvin = (value: number, unit: string): number => {
+      const { factor, offset } = convertTo('temperature', unit) as Conversion;
+      return value * factor + offset;
+    };
+    expect(kelvin(0, '°C')).toBeCloseTo(273.15, 9);
+    expect(kelvin(32, '°F')).toBeCloseTo(273.15, 9);
+    expect(kelvin(-40, 'deg C')).toBeCloseTo(kelvin(-40, 'Fahrenheit'), 9);
+    expect((convertTo('temperature', 'ng/g') as UnitProblem).code).toBe('unknown-unit');
+  });
 
   test('the explanation shows the factor and what was assumed', () => {
     expect((convertTo('massFlux', 'mg m-2 d-1') as Conversion).explanation).toBe(
@@ -128,7 +147,7 @@ describe('unit strings put together from parts', () => {
   test('every spelling of the same unit has the same factor, the product of its parts', () => {
     fc.assert(
       fc.property(mass, area, time, spelling, (m, l, t, spell) => {
-        const expected = (m[1] as number) / (l[1] as number) / (t[1]);
+        const expected = (m[1] as number) / (l[1] as number) / t[1];
         expect(factorOf('massFlux', spell(String(m[0]), String(l[0]), String(t[0]))) / expected).toBeCloseTo(
           1,
           12,

@@ -1,4 +1,6 @@
+import { readableKind } from '../dataset/record-kinds';
 import type { SampleRow, TracedValue } from '../dataset/sample-row';
+import { turnedTable } from '../sheet/turned';
 import { isRefused, presentText } from './cell-problems';
 import type { VettingContext } from './context';
 import type { RuleHit } from './rule';
@@ -12,8 +14,25 @@ export function splitAddress(cell: string | null | undefined): { column: string;
   return parts ? { column: parts[1]!, row: Number(parts[2]) } : null;
 }
 
-/** Column letter a field was mapped from on a sheet, null when it came from elsewhere. */
+/** Sheets whose table is turned, by context: there a mapped letter stands for a row. */
+const known = new WeakMap<VettingContext, Set<string>>();
+
+function turnedSheets(context: VettingContext): Set<string> {
+  const before = known.get(context);
+  if (before) return before;
+  const kind = readableKind(context.kind ?? 'dust-flux');
+  const turned = context.mapping.tables.filter((table) => {
+    const sheet = context.workbook.sheets.find(({ name }) => name === table.sheet);
+    return table.used && sheet !== undefined && turnedTable(sheet, table, kind) !== null;
+  });
+  const sheets = new Set(turned.map(({ sheet }) => sheet));
+  known.set(context, sheets);
+  return sheets;
+}
+
+/** Column letter a field was mapped from on a sheet, null when it came from elsewhere or runs along a row. */
 export function columnOf(context: VettingContext, sheet: string, field: string): string | null {
+  if (turnedSheets(context).has(sheet)) return null;
   return context.mapping.columns.find((c) => c.sheet === sheet && c.field === field)?.column ?? null;
 }
 

@@ -1,6 +1,6 @@
 import { expect, test } from 'vitest';
 import { datasetKind } from '../dataset/kinds';
-import { sampleText, sampleWorkbook } from '../sheet/fixtures.test-support';
+import { sampleText, sampleWorkbook, sheetOfValues } from '../sheet/fixtures.test-support';
 import type { RawWorkbook } from '../sheet/grid';
 import { normaliseWorkbook } from '../sheet/normalise';
 import { proposeWorkbook } from '../sheet/propose';
@@ -70,4 +70,18 @@ test('tracer fluxes are kept under their name and warned of once a sheet and tra
   const findings = vet(submission(sampleWorkbook('wolff2006edc-chem.xls')));
   const subjects = findings.filter(({ code }) => code === 'V43').map(({ subject }) => subject);
   expect(new Set(subjects)).toEqual(new Set(['nssCa', 'Fe']));
+});
+
+test('findings on a turned table are pinned to the cells of the sheet, and whole fields to no column', () => {
+  const sheet = sheetOfValues('Sheet1', [
+    ['Site', 'North', 'South', 'East'],
+    ['Lat', 70.52, -70.52, 10.25],
+    ['Lon', -40.52, 20.52, 30.25],
+    ['Age (ka BP)', 1, 2, 3],
+    ['Dust flux (g/m2/yr)', 0.05, -0.01, 0.07],
+  ]);
+  const findings = vet(submission({ fileName: 'made.xlsx', format: 'xlsx', sheets: [sheet], readNotes: [] }));
+  const negative = findings.find(({ code }) => code === 'V32');
+  expect(negative).toMatchObject({ sheet: 'Sheet1', row: 5, column: 'C', field: 'fluxGM2Yr' });
+  expect(findings.find(({ code }) => code === 'V54')).toMatchObject({ column: null });
 });

@@ -6,6 +6,7 @@ import { Frame, frameLoader } from './frame';
 import { lazyPage } from './lazy-page';
 import { RouteError } from './route-error';
 import { intakeRoutes } from './routes-intake';
+import { opticsRoutes } from './routes-optics';
 import { scienceRoutes } from './routes-science';
 
 const pages: RouteObject[] = [
@@ -13,6 +14,7 @@ const pages: RouteObject[] = [
   { path: 'desk', lazy: lazyPage(() => import('../routes/desk')) },
   ...intakeRoutes,
   ...scienceRoutes,
+  ...opticsRoutes,
   { path: 'mailbox', lazy: lazyPage(() => import('../routes/mailbox')) },
   { path: 'ledger', lazy: lazyPage(() => import('../routes/ledger')) },
   { path: 'administration', lazy: lazyPage(() => import('../routes/administration')) },

@@ -19,16 +19,11 @@ test('a modeller sees no Intake, a scientist does', () => {
     'Desk',
     'Holdings',
     'Slices',
+    'Optics',
     'Estimates',
     'Exports',
   ]);
   expect(titles(sectionsOf(person('scientist')))).toContain('Intake');
-});
-
-test('a section that is not built yet is not in the navigation', () => {
-  expect(titles(sectionsOf(person('scientist', 'steward', 'modeller', 'administrator')))).not.toContain(
-    'Optics',
-  );
 });
 
 test('the mailbox belongs to the demo, ledger and administration to their roles', () => {

@@ -9,6 +9,7 @@ const sections: readonly Section[] = [
   { title: 'Intake', path: '/intake', key: 'i', roles: ['scientist', 'steward'] },
   { title: 'Holdings', path: '/holdings', key: 'h' },
   { title: 'Slices', path: '/slices', key: 's' },
+  { title: 'Optics', path: '/optics', key: 'o' },
   { title: 'Estimates', path: '/estimates', key: 'e' },
   { title: 'Exports', path: '/exports', key: 'x' },
 ];

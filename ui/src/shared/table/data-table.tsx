@@ -1,5 +1,5 @@
 import { SearchBox } from '@fluentui/react-components';
-import { useMemo, useRef, type ReactNode } from 'react';
+import { useMemo, useState, type ReactNode } from 'react';
 import { useNarrow } from '../theme/colour-mode';
 import { counted } from '../number/format';
 import type { DataColumn } from './column';
@@ -39,7 +39,8 @@ export type DataTableProps<Row extends object> = {
 export function DataTable<Row extends object>(props: DataTableProps<Row>) {
   const { caption, sub, columns, rows, empty, address, bare, filterable, heightPx, foot, roomy } = props;
   const narrow = useNarrow();
-  const scroller = useRef<HTMLDivElement>(null);
+  // Kept as state: the rows are drawn inside the box, and must be drawn again once it is there.
+  const [scroller, setScroller] = useState<HTMLDivElement | null>(null);
   const [view, change] = useTableView(address, {
     sort: props.startSort ?? null,
     descending: props.startDescending ?? false,
@@ -74,7 +75,7 @@ export function DataTable<Row extends object>(props: DataTableProps<Row>) {
         empty
       ) : (
         <div
-          ref={scroller}
+          ref={setScroller}
           className="data-table-scroll"
           style={heightPx ? { maxHeight: heightPx } : undefined}
           tabIndex={heightPx ? 0 : undefined}

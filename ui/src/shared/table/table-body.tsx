@@ -1,5 +1,5 @@
 import { useVirtualizer } from '@tanstack/react-virtual';
-import { useEffect, type KeyboardEvent, type RefObject } from 'react';
+import { useEffect, type KeyboardEvent } from 'react';
 import { Digits } from '../number/digits';
 import type { DataColumn } from './column';
 
@@ -15,7 +15,7 @@ type Props<Row extends object> = {
   selectedKey?: string | null;
   onSelect?: (row: Row) => void;
   onHover?: (row: Row | null) => void;
-  scroller: RefObject<HTMLDivElement | null>;
+  scroller: HTMLDivElement | null;
 };
 
 /** Rows in sight, with the places of all others kept, so that counts and scroll stay true. */
@@ -24,7 +24,8 @@ export function TableBody<Row extends object>(props: Props<Row>) {
   const virtual = heightPx !== undefined && all.length > VIRTUAL_FROM;
   const rows = useVirtualizer({
     count: virtual ? all.length : 0,
-    getScrollElement: () => scroller.current,
+    enabled: virtual, // otherwise it takes hold of the box late, and puts it back to its top
+    getScrollElement: () => scroller,
     estimateSize: () => (roomy ? 37 : 25),
     overscan: 12,
   });
@@ -32,10 +33,10 @@ export function TableBody<Row extends object>(props: Props<Row>) {
   useEffect(() => {
     if (at < 0) return;
     if (virtual) rows.scrollToIndex(at, { align: 'auto' });
-    else if (heightPx) scrollRowIntoView(scroller.current, at);
+    else if (heightPx) scrollRowIntoView(scroller, at);
     // Only a new selection scrolls, never a re-sort under the pointer.
     // eslint-disable-next-line react-hooks/exhaustive-deps
-  }, [selectedKey]);
+  }, [selectedKey, scroller]);
   if (!virtual) {
     return (
       <tbody>

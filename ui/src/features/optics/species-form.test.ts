@@ -12,7 +12,7 @@ const changed = (change: Partial<SpeciesForm['modes'][0]>): SpeciesForm => ({
 test.each(
   READY_MADE_SETS.filter((set): set is ParticleSet => set.kind === 'particles').map((set) => [set.id, set]),
 )('the ready-made set %s comes out of the form as it went in, to six figures', (_, set) => {
-  const definition = definitionOf(set as ParticleSet);
+  const definition = definitionOf(set);
   const read = readSpecies(formOf(definition));
   expect(read).toHaveProperty('definition');
   if (!('definition' in read)) return;

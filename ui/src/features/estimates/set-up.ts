@@ -37,7 +37,7 @@ export const startingSetUp: SetUp = {
 export const setUpRanges = {
   transmittance: [0.3, 1],
   longwaveEfficiency: [-20, 60],
-  shortwaveEfficiency: [-200, 200],
+  shortwaveEfficiency: [-150, 150],
   members: [64, 4096],
   seed: [0, 4_294_967_295],
 } as const satisfies Partial<Record<keyof SetUp, readonly [number, number]>>;

@@ -74,11 +74,8 @@ export function RegionTable({ result, part, usedSites, selected, onSelect, onHov
   const columns = useMemo(() => columnsFor(domainOf(regions, part), part), [regions, part]);
   const pinned = useMemo<Row[]>(() => {
     const total = { code: 'global', name: 'Global mean', siteCount: usedSites, hatched: false };
-    const rest = { code: 'outside', name: 'In no region', siteCount: 0, hatched: false };
-    const totals = [{ ...total, forcing: global.forcing }];
-    // With it the regions add up to the globe; nothing is shown where they already do.
-    return outside.areaShare > 0 ? [...totals, { ...rest, forcing: outside.forcing }] : totals;
-  }, [global, outside, usedSites]);
+    return [{ ...total, forcing: global.forcing }];
+  }, [global, usedSites]);
   return (
     <DataTable<Row>
       caption={`${regions.length} regions`}
@@ -97,6 +94,8 @@ export function RegionTable({ result, part, usedSites, selected, onSelect, onHov
       foot={
         <>
           Slice minus reference, positive warms. <HatchSign /> few sites, or the interval includes zero.
+          {outside.areaShare > 0 &&
+            ` A gap of ${formatNumber(outside.areaShare * 100, { figures: 2 })} % of the Earth lies in no region; with it the regions add up to the globe.`}
         </>
       }
     />

@@ -12,9 +12,11 @@ export async function send(page: Page, product: Product, file: FileGiven): Promi
   await page.goto(`${product.url}/intake`);
   await page.getByRole('button', { name: 'Upload a spreadsheet' }).first().click();
   const dialog = page.getByRole('dialog', { name: 'Upload a spreadsheet' });
-  const chooser = page.waitForEvent('filechooser');
-  await dialog.getByRole('button', { name: 'Choose a file' }).click();
-  await (await chooser).setFiles(file);
+  const [chooser] = await Promise.all([
+    page.waitForEvent('filechooser'),
+    dialog.getByRole('button', { name: 'Choose a file' }).click(),
+  ]);
+  await chooser.setFiles(file);
   await dialog.getByRole('button', { name: 'Upload', exact: true }).click();
 }
 

@@ -113,7 +113,8 @@ test('a steward takes both from the queue, reads findings in the grid, waives wi
   expect(await page.getByRole('main').innerText()).toMatch(
     new RegExp(`Ilka Vossberg \\(\\d{4}\\): ${workbookTitle}, version 1\\..*CC-BY-4\\.0`),
   );
-  await page.getByRole('cell', { name: 'EDC' }).first().waitFor();
+  const samples = page.getByRole('table', { name: 'Samples' });
+  await samples.getByRole('row', { name: /^EDC/ }).first().waitFor();
   await page.goto(product.url + paths.table);
   await approve(page, 'Looked at, row by row.');
   await leave();
@@ -184,9 +185,10 @@ test.each([
   await page.waitForURL(/\/exports/);
   const row = page.getByRole('row', { name: new RegExp(wanted.format) });
   await row.getByText('Done').waitFor({ timeout: 60_000 });
-  const arrival = page.waitForEvent('download');
-  await row.getByRole('link', { name: wanted.file }).click();
-  const download = await arrival;
+  const [download] = await Promise.all([
+    page.waitForEvent('download'),
+    row.getByRole('link', { name: wanted.file }).click(),
+  ]);
   const bytes = await readFile(await download.path());
   expect(download.suggestedFilename()).toMatch(wanted.file);
   expect(bytes.subarray(0, 20_000).toString('latin1')).toMatch(wanted.begins);

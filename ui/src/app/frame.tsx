@@ -86,6 +86,8 @@ function usePageFocus() {
       first.current = false;
       return;
     }
+    // A dialog with an address of its own keeps the focus; taken from it, it would be hidden from readers.
+    if (document.querySelector('[aria-modal="true"]')) return;
     if (how !== NavigationType.Pop && main.current) main.current.scrollTop = 0;
     (main.current?.querySelector('h1') ?? main.current)?.focus({ preventScroll: true });
   }, [pathname, how]);

@@ -55,14 +55,10 @@ test('a ready-made set is changed, its curves follow, it is published, and an es
   await page.waitForURL(/\/optics\/fine-dust-of-a-walk$/);
   await page.getByRole('heading', { level: 1, name: 'Fine dust of a walk' }).waitFor();
   await page.getByRole('button', { name: 'Publish' }).click();
-  await page.getByRole('dialog').getByRole('button', { name: 'Publish' }).click();
+  await page.getByRole('alertdialog').getByRole('button', { name: 'Publish' }).click();
   await page.locator('.state-tag', { hasText: 'Published' }).waitFor();
 
   await page.goto(`${product.url}/estimates/new`);
-  await page
-    .getByRole('button', { name: /optics/i })
-    .first()
-    .click();
   const choice = page.getByLabel('Optical set');
   await choice.selectOption({ label: 'Fine dust of a walk, version 1' });
   const values = page.getByRole('table', { name: 'Values of Fine dust of a walk' });
@@ -76,8 +72,8 @@ test('sets are compared, equations and sources stand by, and nothing of it asks 
   await signIn(page, product, 'modeller', '/optics/dust-pm20-desert?with=dust-fine,dust-broadband');
   await page.getByRole('heading', { level: 1, name: 'Desert dust below 20 µm' }).waitFor();
   const figure = page.getByRole('figure', { name: 'Single-scattering albedo' });
-  await figure.getByText('Fine dust below 2.5 µm').waitFor();
-  await figure.getByText('Mineral dust, broadband for one-layer formulas').waitFor();
+  await figure.getByText('Fine dust below 2.5 µm', { exact: true }).waitFor();
+  await figure.getByText('Mineral dust, broadband for one-layer formulas', { exact: true }).waitFor();
   expect(await page.getByRole('button', { name: 'Publish' }).count()).toBe(0);
   await page.getByRole('tab', { name: 'By number' }).click();
   await page.getByText('share of number per unit of ln radius; axis: radius in µm').waitFor();

@@ -76,11 +76,16 @@ export function LogChart({ series, label, heightPx, linearX, logY, xTicks, dashe
             {plain(tick)}
           </text>
         ))}
-        {dashedAt && (
+        {dashedAt && dashedAt.x >= xDomain[0] && dashedAt.x <= xDomain[1] && (
           <g>
             <line x1={x(dashedAt.x)} x2={x(dashedAt.x)} y1={top} y2={bottom} className="optics-dashed" />
             {dashedAt.text && (
-              <text x={x(dashedAt.x)} y={12} textAnchor="middle" className="tick">
+              <text
+                x={x(dashedAt.x)}
+                y={12}
+                textAnchor={x(dashedAt.x) > width - 90 ? 'end' : 'middle'}
+                className="tick"
+              >
                 {dashedAt.text}
               </text>
             )}

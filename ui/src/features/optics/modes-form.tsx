@@ -10,11 +10,11 @@ import { withMode, type Faults, type ModeForm, type ModeNumber, type SpeciesForm
 type Props = { form: SpeciesForm; faults: Faults; onChange: (form: SpeciesForm) => void };
 
 const shown: Record<ModeNumber, string> = {
-  medianRadiusUm: 'Median r, µm',
+  medianRadiusUm: 'Median, µm',
   geometricStdDev: 'Width σ',
   numberFraction: 'Number',
-  minRadiusUm: 'From r, µm',
-  maxRadiusUm: 'To r, µm',
+  minRadiusUm: 'From, µm',
+  maxRadiusUm: 'To, µm',
   densityGCm3: 'Density',
 };
 const longLabels: Record<ModeNumber, string> = {
@@ -36,7 +36,7 @@ export function ModesForm({ form, faults, onChange }: Props) {
     <section className="optics-form" aria-label="Particles">
       <header>
         <h3>Modes</h3>
-        <span className="figure-sub">lognormal by number; density in g/cm³</span>
+        <span className="figure-sub">radii, lognormal by number; density in g/cm³</span>
         <span className="sl-grow" />
         <Button
           size="small"

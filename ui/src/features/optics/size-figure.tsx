@@ -21,7 +21,7 @@ export function SizeFigure({ sets }: { sets: readonly ShownSet[] }) {
           name: mode.name,
           colour: at + 1,
           filled: true,
-          points: own.points.map((point) => ({ x: point.radiusUm, y: point.modes[at]! })),
+          points: cut(own.points.map((point) => ({ x: point.radiusUm, y: point.modes[at]! }))),
         }))
       : [];
   const wholes = curves.map(({ set, points }): LogSeries => ({
@@ -30,7 +30,7 @@ export function SizeFigure({ sets }: { sets: readonly ShownSet[] }) {
     bold: set === sets[0],
     dash: set === sets[0] ? undefined : '5 3',
     filled: set === sets[0] && modes.length < 2,
-    points: points.map((point) => ({ x: point.radiusUm, y: point.all })),
+    points: cut(points.map((point) => ({ x: point.radiusUm, y: point.all }))),
   }));
   return (
     <Figure<SizePoint>
@@ -74,5 +74,12 @@ export function SizeFigure({ sets }: { sets: readonly ShownSet[] }) {
     </Figure>
   );
 }
+
+/** Limits cut a distribution: its curve falls to the axis there. */
+const cut = (points: { x: number; y: number }[]) => [
+  { x: points[0]!.x, y: 0 },
+  ...points,
+  { x: points.at(-1)!.x, y: 0 },
+];
 
 const round = (value: number) => Number(value.toPrecision(4));

@@ -27,6 +27,8 @@ import { useCurves } from './use-curves';
 import { useSetActs } from './use-set-acts';
 
 const OWN = '#own';
+/** Sets beside take the palette from its end: modes take it from its start. */
+const LAST_COLOUR = 5;
 /** Between a stroke and the fast curves, so that a burst of strokes asks once. */
 const TYPING_MS = 120;
 
@@ -190,7 +192,7 @@ function useShownSets(title: string, read: ReturnType<typeof readSet>, beside: r
   const shown = others.map((other, at): ShownSet => ({
     key: other.slug,
     title: other.title,
-    colour: at + 1,
+    colour: LAST_COLOUR - at,
     definition: definitionIn(other),
     curves: drawn.get(other.slug)?.curves,
     rows: rowsOf(other),

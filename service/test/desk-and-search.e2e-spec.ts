@@ -37,7 +37,10 @@ test('a steward sees the queue, oldest first, with their own submissions told ap
 test('a scientist sees their submissions and what waits for their word, and no queue', async () => {
   const estimate = await estimated(who('scientist2'), { title: 'Waits for a word' });
   const desk = await deskOf('scientist');
-  expect(desk).toMatchObject({ queue: [], lately: [], stale: [] });
+  expect(desk).toMatchObject({ queue: [], stale: [] });
+  // Their own acts, and no comings and goings.
+  expect(desk.lately.some(({ summary }) => summary.startsWith('S-0005'))).toBe(true);
+  expect(desk.lately.some(({ summary }) => /signed in|S-0004/i.test(summary))).toBe(false);
   expect(desk.mySubmissions.map(({ state }) => state)).toEqual(['returned']);
   expect(desk.awaitingSignOff.map(({ id }) => id)).toEqual([estimate.id]);
   expect((await deskOf('scientist2')).awaitingSignOff).toEqual([]);

@@ -8,6 +8,8 @@ import { SubmissionsService } from '../submissions/submissions.service';
 
 const SHOWN = 50;
 const LATELY = 12;
+/** In the ledger, and no news. */
+const COMINGS_AND_GOINGS = ['sign-in', 'sign-out', 'end-session'];
 
 /** What waits for a person, by their roles. */
 @Injectable()
@@ -35,7 +37,7 @@ export class DeskService {
         runs.filter(({ state, version }) => state === 'published' && version?.staleSince),
       ),
       latestPublished: await this.summaries([...(await this.lists.latestPublished(person)).values()]),
-      lately: has('steward', 'administrator') ? await this.lately() : [],
+      lately: await this.lately(has('steward', 'administrator') ? {} : { personId: person.id }),
     };
   }
 
@@ -52,8 +54,9 @@ export class DeskService {
     return Promise.all(runs.slice(0, SHOWN).map((run) => this.estimates.summary(run)));
   }
 
-  private async lately(): Promise<DeskView['lately']> {
-    const rows = await this.ledger.find({}, LATELY);
+  /** Stewards and administrators see what everybody did, others what they did themselves. */
+  private async lately(whose: { personId?: string }): Promise<DeskView['lately']> {
+    const rows = await this.ledger.find({ ...whose, notVerbs: COMINGS_AND_GOINGS }, LATELY);
     return rows.map(({ at, summary, objectKind, objectId }) => ({
       at,
       summary,

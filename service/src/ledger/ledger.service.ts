@@ -24,6 +24,8 @@ export interface LedgerFilter {
   objectId?: string | undefined;
   personId?: string | undefined;
   verb?: string | undefined;
+  /** acts to leave aside */
+  notVerbs?: string[] | undefined;
 }
 
 export interface ChainCheck {
@@ -101,12 +103,13 @@ function faultOf(row: LedgerRow, expectedPosition: number, previousHash: string)
   return null;
 }
 
-function selection({ objectKind, objectId, personId, verb }: LedgerFilter): WhereOptions {
+function selection({ objectKind, objectId, personId, verb, notVerbs }: LedgerFilter): WhereOptions {
   return {
     ...(objectKind ? { objectKind } : {}),
     ...(objectId ? { objectId } : {}),
     ...(personId ? { actorId: personId } : {}),
     ...(verb ? { verb } : {}),
+    ...(notVerbs ? { verb: { [Op.notIn]: notVerbs } } : {}),
   };
 }
 

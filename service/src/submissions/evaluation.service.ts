@@ -102,6 +102,7 @@ export class Evaluations {
       const reason = reasons.get(`${row.sheet}\0${row.row}`);
       return reason === undefined ? row : { ...row, leftOut: reason };
     });
+    const held = await this.held.all();
     const context: VettingContext = {
       workbook,
       mapping,
@@ -109,7 +110,8 @@ export class Evaluations {
       metadata,
       formOffered: draft.formOffered,
       kind,
-      heldSites: await this.held.all(),
+      heldSites: held.sites,
+      heldSamples: held.samples,
       limits: {},
       missingCodes,
     };

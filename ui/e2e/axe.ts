@@ -4,18 +4,34 @@ import type { Page } from 'playwright-core';
 /** Fluent's tab sentinels: empty elements that only catch the focus and pass it on. */
 const sentinel = 'i[data-tabster-dummy][aria-hidden="true"]';
 
+const tags = ['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'];
+
 /** Serious and critical faults of access, each as one readable line; empty when there is none. */
-export async function axeFaults(page: Page): Promise<string[]> {
-  const { violations } = await new AxeBuilder({ page })
-    .withTags(['wcag2a', 'wcag2aa', 'wcag21a', 'wcag21aa', 'wcag22aa'])
-    .analyze();
+export const axeFaults = (page: Page): Promise<string[]> =>
+  faultsOf(page, new AxeBuilder({ page }).withTags(tags));
+
+/** The same page under the other theme differs in its colours alone. */
+export async function axeFaultsInDark(page: Page): Promise<string[]> {
+  await page.emulateMedia({ colorScheme: 'dark' });
+  const faults = await faultsOf(
+    page,
+    new AxeBuilder({ page }).withRules(['color-contrast', 'link-in-text-block']),
+  );
+  await page.emulateMedia({ colorScheme: 'light' });
+  return faults;
+}
+
+async function faultsOf(page: Page, axe: AxeBuilder): Promise<string[]> {
+  const { violations } = await axe.options({ resultTypes: ['violations'] }).analyze();
   const faults: string[] = [];
   for (const { id, impact, nodes } of violations) {
     if (impact !== 'serious' && impact !== 'critical') continue;
     for (const { target, html, failureSummary } of nodes) {
       const selector = String(target.at(-1));
       if (id === 'aria-hidden-focus' && (await isSentinel(page, selector))) continue;
-      faults.push(`${id} at ${selector}: ${html.slice(0, 160)} ${(failureSummary ?? '').replace(/\s+/g, ' ')}`);
+      faults.push(
+        `${id} at ${selector}: ${html.slice(0, 160)} ${(failureSummary ?? '').replace(/\s+/g, ' ')}`,
+      );
     }
   }
   return faults;

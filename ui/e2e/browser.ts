@@ -38,14 +38,23 @@ async function launchBundled(): Promise<Browser> {
   const { default: bundled } = await import('@sparticuz/chromium');
   bundled.setGraphicsMode = false;
   const executablePath = await bundled.executablePath();
-  const env = { ...process.env, FONTCONFIG_PATH: process.env.FONTCONFIG_PATH ?? path.join(tmpdir(), 'fonts') };
+  const env = {
+    ...process.env,
+    FONTCONFIG_PATH: process.env.FONTCONFIG_PATH ?? path.join(tmpdir(), 'fonts'),
+  };
   try {
     return await chromium.launch({ executablePath, args: quiet, env });
   } catch (first) {
     try {
-      return await chromium.launch({ executablePath, args: quiet, env: { ...env, LD_LIBRARY_PATH: unpack() } });
+      return await chromium.launch({
+        executablePath,
+        args: quiet,
+        env: { ...env, LD_LIBRARY_PATH: unpack() },
+      });
     } catch (second) {
-      throw new AggregateError([first, second], 'The bundled browser does not start. Install chromium.');
+      throw new AggregateError([first, second], 'The bundled browser does not start. Install chromium.', {
+        cause: second,
+      });
     }
   }
 }

@@ -31,10 +31,12 @@ export async function upload(page: Page, product: Product, file: FileGiven): Pro
 export const nextStep = (page: Page) => page.getByRole('region', { name: 'Next step' });
 export const findings = (page: Page) => page.getByRole('complementary', { name: /^Findings/ });
 
-export type Answers = { title?: string; creator: string; licence: string; choices: Record<string, string> } & (
-  | { doi: string }
-  | { citation: string }
-);
+export type Answers = {
+  title?: string;
+  creator: string;
+  licence: string;
+  choices: Record<string, string>;
+} & ({ doi: string } | { citation: string });
 
 /** Answers what the sheet does not say, and closes the form. */
 export async function fillForm(page: Page, answers: Answers): Promise<void> {
@@ -81,6 +83,8 @@ export async function approve(page: Page, reason: string): Promise<void> {
   await waiveAll(page, reason);
   await nextStep(page).getByRole('button', { name: 'Approve' }).click();
   await page.getByRole('dialog').getByRole('button', { name: 'Approve', exact: true }).click();
-  await nextStep(page).getByRole('link', { name: /^version 1 of/ }).click();
+  await nextStep(page)
+    .getByRole('link', { name: /^version 1 of/ })
+    .click();
   await page.waitForURL(/\/holdings\//);
 }

@@ -75,10 +75,14 @@ test('letters after g open sections, a stroke goes to the search, and Enter open
     await page.keyboard.press('g');
     await page.keyboard.press(letter!);
     await page.waitForURL(product.url + path);
+    await expect.poll(() => page.evaluate(() => document.activeElement?.tagName)).toBe('H1');
   }
   await page.keyboard.press('/');
   await page.keyboard.type('Glacial Max');
-  await page.getByRole('option', { name: /Last Glacial Maximum/ }).first().waitFor();
+  await page
+    .getByRole('option', { name: /Last Glacial Maximum/ })
+    .first()
+    .waitFor();
   await page.keyboard.press('Enter');
   await page.waitForURL(/\/slices\/lgm$/);
   await leave();

@@ -3,21 +3,25 @@ import type { PersonKey } from './people';
 
 export type NamedPage = { name: string; path: string };
 
-type Listed = { items: { id: string; state: string; title: string }[] };
+type Listed<Item> = { items: Item[] };
+
+/** Asks the service as the person on the page does. */
+const ask = <Item>(page: Page, path: string) =>
+  page.evaluate(async (address) => {
+    const answer = await fetch(`/api/v1${address}`);
+    return (await answer.json()) as unknown;
+  }, path) as Promise<Listed<Item>>;
 
 /** Every address of the client with something of the demo scenario to show on it. */
 export async function everyPage(page: Page, who: PersonKey): Promise<NamedPage[]> {
-  const found = await page.evaluate(async () => {
-    const ask = async (path: string) => (await fetch(`/api/v1${path}`)).json();
-    const fields = await ask('/fields?slice=lgm');
-    const estimates = await ask('/estimates?slice=lgm');
-    const datasets = await ask('/datasets');
-    return {
-      field: fields.items[0].versionId as string,
-      estimate: estimates.items[0].id as string,
-      dataset: datasets.items[0].slug as string,
-    };
-  });
+  const fields = await ask<{ versionId: string }>(page, '/fields?slice=lgm');
+  const estimates = await ask<{ id: string }>(page, '/estimates?slice=lgm');
+  const datasets = await ask<{ slug: string }>(page, '/datasets');
+  const found = {
+    field: fields.items[0]!.versionId,
+    estimate: estimates.items[0]!.id,
+    dataset: datasets.items[0]!.slug,
+  };
   const everybody: NamedPage[] = [
     { name: 'desk', path: '/desk' },
     { name: 'holdings', path: '/holdings' },
@@ -44,7 +48,7 @@ async function ownPages(page: Page, who: PersonKey, field: string): Promise<Name
     ];
   }
   if (who === 'modeller') return [];
-  const { items } = await page.evaluate<Listed>(async () => (await fetch('/api/v1/submissions')).json());
+  const { items } = await ask<{ id: string }>(page, '/submissions');
   const first = items[0]!.id;
   const intake: NamedPage[] = [
     { name: 'intake', path: who === 'steward' ? '/intake?view=queue' : '/intake' },

@@ -1,13 +1,18 @@
 import { Button } from '@fluentui/react-components';
 import { Dismiss20Regular } from '@fluentui/react-icons';
 import { useEffect, useRef, type ReactNode } from 'react';
+import { useNarrow } from '../../shared/theme/colour-mode';
 
 type Props = { title: string; sub?: ReactNode; onClose: () => void };
 
 /** Head of a panel beside the grid; it takes the keyboard when the panel opens. */
 export function PanelHead({ title, sub, onClose }: Props) {
   const heading = useRef<HTMLHeadingElement>(null);
-  useEffect(() => heading.current?.focus({ preventScroll: true }), []);
+  const narrow = useNarrow();
+  useEffect(() => {
+    heading.current?.focus({ preventScroll: true });
+    if (narrow) heading.current?.scrollIntoView?.({ block: 'start' }); // there it stands beneath the grid
+  }, [narrow]);
   return (
     <header className="panel-head">
       <h2 ref={heading} tabIndex={-1}>

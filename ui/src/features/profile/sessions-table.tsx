@@ -5,6 +5,7 @@ import { ErrorState } from '../../shared/feedback/error-state';
 import { formatAgo, formatDateTime } from '../../shared/number/time';
 import type { DataColumn } from '../../shared/table/column';
 import { DataTable } from '../../shared/table/data-table';
+import { browserWords } from './browser-words';
 import { endOtherSession, sessionsQuery } from './queries';
 
 /** Where one is signed in; any other session can be ended from here. */
@@ -16,13 +17,24 @@ export function SessionsTable() {
     onSettled: () => client.invalidateQueries({ queryKey: sessionsQuery.queryKey }),
   });
   const columns: DataColumn<SessionView>[] = [
-    { id: 'browser', header: 'Browser', value: (row) => row.browser },
-    { id: 'address', header: 'Address', value: (row) => row.address, wideOnly: true },
+    {
+      id: 'browser',
+      header: 'Browser',
+      value: (row) => browserWords(row.browser),
+      cell: (row) => <span title={row.browser}>{browserWords(row.browser)}</span>,
+    },
+    {
+      id: 'address',
+      header: 'Address',
+      value: (row) => row.address,
+      cell: (row) => <span className="sl-unit">{row.address}</span>,
+      wideOnly: true,
+    },
     {
       id: 'since',
       header: 'Signed in',
       value: (row) => row.createdAt,
-      cell: (row) => formatDateTime(row.createdAt),
+      cell: (row) => <span className="sl-unit">{formatDateTime(row.createdAt)}</span>,
       wideOnly: true,
     },
     {
@@ -45,7 +57,7 @@ export function SessionsTable() {
           <Button
             size="small"
             disabled={end.isPending}
-            aria-label={`End the session of ${row.browser}`}
+            aria-label={`End the session of ${browserWords(row.browser)}`}
             onClick={() => end.mutate(row.id)}
           >
             End

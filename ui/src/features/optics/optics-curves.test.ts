@@ -59,3 +59,12 @@ test('a larger median radius changes extinction', () => {
   const [before, after] = [drained().curves, drained(larger).curves];
   expect(after.at550.massExtinctionM2PerG).toBeLessThan(0.8 * before.at550.massExtinctionM2PerG);
 });
+
+// Dry, f is 1 by definition; particles that take up water grow, and scatter more.
+test('f(RH) begins at 1, rises to 95 % for what takes up water, and is left out for what takes up none', () => {
+  const { humidity } = drained({ ...startingDefinition, kappa: 0.61, relativeHumidity: 0.8 }).curves;
+  expect(humidity[0]).toEqual({ relativeHumidity: 0, ratio: 1 });
+  expect(humidity.at(-1)!.relativeHumidity).toBe(0.95);
+  humidity.slice(1).forEach(({ ratio }, at) => expect(ratio).toBeGreaterThan(humidity[at]!.ratio));
+  expect(drained().curves.humidity).toEqual([]);
+});

@@ -14,6 +14,7 @@ import {
   speciesRange,
   type ParticleDefinition,
 } from '@siltlight/common/optics/species-optics';
+import { humidityCurve } from '@siltlight/common/optics/water-uptake';
 
 export const REFERENCE_UM = 0.55;
 const SPECTRUM_UM = [0.3, 15] as const;
@@ -24,6 +25,7 @@ type Range = { low: number; central: number; high: number };
 export type Quantity = 'massExtinctionM2PerG' | 'singleScatteringAlbedo' | 'asymmetry';
 export type SpectrumPoint = { wavelengthUm: number } & Record<Quantity, Range>;
 export type PhasePoint = { angleDeg: number; value: number };
+export type HumidityPoint = { relativeHumidity: number; ratio: number };
 export type Band = { name: string; temperatureK: number } & Record<Quantity, number>;
 
 export type Curves = {
@@ -32,6 +34,8 @@ export type Curves = {
   spectrum: SpectrumPoint[];
   phase: PhasePoint[];
   bands: Band[];
+  /** Empty for what takes up no water. */
+  humidity: HumidityPoint[];
 };
 
 /** 30 wavelengths evenly in ln λ, the one nearest 0.55 µm moved onto it. */
@@ -71,6 +75,11 @@ export function* curveSteps(definition: ParticleDefinition, precision: Precision
   }
   const phase = phaseCurve(definition, precision);
   yield;
+  const humidity: HumidityPoint[] = [];
+  for (const relativeHumidity of definition.kappa > 0 ? curveHumidities : []) {
+    humidity.push({ relativeHumidity, ratio: humidityRatio(definition, relativeHumidity, precision) });
+    yield;
+  }
   const bands: Band[] = [];
   for (const [low, high, temperatureK] of bandEdges) {
     const weights = planckWeights(temperatureK, [low, high], 4);
@@ -84,7 +93,23 @@ export function* curveSteps(definition: ParticleDefinition, precision: Precision
   }
   const all = bandOptics((um) => speciesOptics(definition, um, precision), shortwaveWeights(12));
   bands.push({ name: 'shortwave', temperatureK: SUN_TEMPERATURE_K, ...all });
-  return { precision, at550, spectrum, phase, bands };
+  return { precision, at550, spectrum, phase, bands, humidity };
+}
+
+/** Closer where f(RH) is steep. */
+const curveHumidities = [
+  0, 0.1, 0.2, 0.3, 0.4, 0.5, 0.6, 0.7, 0.75, 0.8, 0.825, 0.85, 0.875, 0.9, 0.91, 0.92, 0.93, 0.94, 0.95,
+] as const;
+
+/** f(RH) at 0.55 µm; the dry mixture holds the coarse addition, and a factor for shape cancels. */
+function humidityRatio(
+  definition: ParticleDefinition,
+  relativeHumidity: number,
+  precision: Precision,
+): number {
+  const dry = scatteringModes({ ...definition, relativeHumidity: 0 }, REFERENCE_UM);
+  const modes = dry.map((mode) => ({ ...mode, kappa: definition.kappa }));
+  return humidityCurve(modes, [relativeHumidity], REFERENCE_UM, precision)[0]!;
 }
 
 /** Phase function at 0.55 µm, degree by degree, ½∫P dμ = 1. */

@@ -3,6 +3,7 @@ import type {
   NewOpticalSet,
   OpticalSetDetail,
   OpticalSetDraft,
+  OpticalSetVersion,
 } from '@siltlight/common/wire/optics';
 import { queryOptions } from '@tanstack/react-query';
 import { api } from '../../shared/api/client';
@@ -21,6 +22,12 @@ export const opticalSetQuery = (slug: string) =>
   queryOptions({
     queryKey: ['optical-sets', 'one', slug],
     queryFn: () => api.get<OpticalSetDetail>(address(slug)),
+  });
+
+export const setVersionsQuery = (slug: string) =>
+  queryOptions({
+    queryKey: ['optical-sets', 'versions', slug],
+    queryFn: async () => (await api.get<{ items: OpticalSetVersion[] }>(`${address(slug)}/versions`)).items,
   });
 
 export const createSet = (draft: NewOpticalSet) => api.post<OpticalSetDetail>('/optical-sets', draft);

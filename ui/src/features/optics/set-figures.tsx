@@ -1,5 +1,6 @@
 import { Unit } from '../../shared/number/unit';
 import { BandsFigure } from './bands-figure';
+import { HumidityFigure } from './humidity-figure';
 import { PhaseFigures } from './phase-figures';
 import type { ShownSet } from './shown-set';
 import { SpectrumFigure } from './spectrum-figure';
@@ -36,6 +37,7 @@ export function SetFigures({ sets }: { sets: readonly ShownSet[] }) {
           <PhaseFigures sets={sets} />
         </div>
       )}
+      <HumidityFigure sets={sets} />
       {own.curves && <BandsFigure bands={own.curves.bands} />}
     </>
   );

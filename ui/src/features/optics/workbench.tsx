@@ -13,6 +13,7 @@ import { StateTag } from '../../shared/page/state-tag';
 import { ComparePicker, MAX_BESIDE } from './compare-picker';
 import { Equations } from './equations';
 import { MeasuredFields } from './measured-fields';
+import { MeasuredTextField } from './measured-text-field';
 import { ModesForm } from './modes-form';
 import './optics.css';
 import { opticalSetQuery } from './queries';
@@ -25,6 +26,7 @@ import { SummaryLine } from './summary-line';
 import { ToldFields } from './told-fields';
 import { useCurves } from './use-curves';
 import { useSetActs } from './use-set-acts';
+import { VersionsList } from './versions-list';
 
 const OWN = '#own';
 /** Sets beside take the palette from its end: modes take it from its start. */
@@ -36,6 +38,7 @@ const TYPING_MS = 120;
 export function Workbench({ set }: { set: OpticalSetDetail | null }) {
   const [form, setForm] = useState<SetForm>(() => startOf(set));
   const [saved, setSaved] = useState(form);
+  const [pasted, setPasted] = useState('');
   const [asking, setAsking] = useState(false);
   const [params, setParams] = useSearchParams();
   const isScientist = useHasRole('scientist');
@@ -87,7 +90,7 @@ export function Workbench({ set }: { set: OpticalSetDetail | null }) {
         </>
       }
     >
-      <LeaveGuard when={dirty && !acts.busy} />
+      <LeaveGuard when={(dirty || pasted.trim() !== '') && !acts.busy} />
       <ConfirmDialog
         open={asking}
         title="Publish this set?"
@@ -128,11 +131,19 @@ export function Workbench({ set }: { set: OpticalSetDetail | null }) {
               onChange={(particles) => setForm({ ...form, particles })}
             />
           ) : (
-            <MeasuredFields
-              form={form.measured}
-              faults={faults}
-              onChange={(measured) => setForm({ ...form, measured })}
-            />
+            <>
+              <MeasuredFields
+                form={form.measured}
+                faults={faults}
+                onChange={(measured) => setForm({ ...form, measured })}
+              />
+              <MeasuredTextField
+                text={pasted}
+                form={form.measured}
+                onText={setPasted}
+                onChange={(measured) => setForm({ ...form, measured })}
+              />
+            </>
           )}
           {fault && <p className="optics-fault">{fault.message}</p>}
         </div>
@@ -148,6 +159,7 @@ export function Workbench({ set }: { set: OpticalSetDetail | null }) {
       {form.kind === 'particles' && (
         <ToldFields form={form} mayName={!ownSet} problem={acts.problem} onChange={setForm} />
       )}
+      {set && <VersionsList slug={set.slug} />}
       <Equations />
     </Page>
   );

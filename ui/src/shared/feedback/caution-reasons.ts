@@ -49,6 +49,14 @@ const reasons: Readonly<Record<string, string>> = {
     'The longwave efficiency in use belongs to all sky; no clear-sky value follows from it.',
   'interval-covers-varied-inputs':
     'The interval holds what was varied. It does not hold the choice of method, missing processes or regions without records.',
+  spheres:
+    'The Mie series is exact for spheres only. Dust has more surface for its volume than a sphere and scatters less straight back and more sideways; extinction per mass of real dust is higher. The factor for shape is a first correction of extinction alone; albedo and asymmetry stay those of spheres.',
+  'single-index':
+    'Iron oxides set the absorption of dust and differ from soil to soil: over 19 soils k at 0.52 µm spans a factor of 8 (Di Biagio et al. 2019). Compare a set of low and one of high absorption before trusting one albedo.',
+  'index-constant':
+    'Minerals absorb more in the ultraviolet and have strong bands in the infrared, near 9 to 10 µm for silicates (from memory). A typed value is sound near the wavelength it was measured at; for spectra and bands choose a table or a mixture.',
+  'humidity-near-saturation':
+    'Growth by κ leaves out the curvature of small drops, which at 90 % humidity lowers the diameter by about 3 % at 100 nm dry diameter and 0.3 % at 1 µm (ammonium sulfate; Petters & Kreidenweis 2007 for the form). Near saturation a small error of humidity is a large one of water.',
 };
 
 export const reasonOf = (code: string): string | undefined => reasons[code];

@@ -287,3 +287,25 @@ test('the calculators of modes and of mixed indices answer their check rows', as
   expect((await calculate('mixed-index', broken).expect(422)).body.detail).toMatch(/add up to 1/);
   await calculate('mode-optics', { wavelengthUm: 0.44, modes: [] }).expect(422);
 });
+
+test('the optics calculators answer anybody signed in, whatever the role, and nobody else', async () => {
+  const refractiveIndex = { real: 1.53, imaginary: 0.003 };
+  const size = { medianRadiusUm: 0.1, geometricStdDev: 1.6, minRadiusUm: 0.005, maxRadiusUm: 10 };
+  const layer = { opticalDepth: 0.01, singleScatteringAlbedo: 0.75, asymmetry: 0.6, surfaceAlbedo: 0.1 };
+  const requests: [name: string, body: object][] = [
+    ['mie', { sizeParameter: 1, refractiveIndex }],
+    ['mode-optics', { wavelengthUm: 0.55, modes: [{ ...size, densityGCm3: 2.6, refractiveIndex }] }],
+    ['mixed-index', { rule: 'bruggeman', components: [{ volumeFraction: 1, refractiveIndex }] }],
+    ['layer', { ...layer, cosSolarZenith: 0.5, scheme: 'multi-stream' }],
+  ];
+  const steward = await signedInAs(service, 'steward');
+  const admin = await signedInAs(service, 'admin');
+  for (const [name, body] of requests) {
+    const path = `/api/v1/calculators/${name}`;
+    for (const caller of [author, modeller, steward, admin]) {
+      await caller.post(path, body).expect(200);
+      await caller.post(path, {}).expect(422);
+    }
+    await service.stranger().post(path).send(body).expect(401);
+  }
+});

@@ -1,6 +1,6 @@
 // What start, test and dev share: install and build only when something changed since the last time.
 import { createHash } from 'node:crypto';
-import { spawnSync } from 'node:child_process';
+import { spawn, spawnSync } from 'node:child_process';
 import { existsSync, mkdirSync, readFileSync, readdirSync, statSync, writeFileSync } from 'node:fs';
 import path from 'node:path';
 
@@ -24,6 +24,26 @@ export function run(command, args, options = {}) {
   if (done.status !== 0) {
     console.error(`\n${[command, ...args].join(' ')} ended with code ${done.status ?? done.signal}.`);
     process.exit(done.status || 1);
+  }
+}
+
+/** Runs npm scripts side by side (each takes one core), shows each one's output whole, and ends when one fails. */
+export async function together(scripts) {
+  const codes = await Promise.all(
+    scripts.map(async (script) => {
+      const child = spawn('npm', ['run', script], { cwd: root, stdio: ['ignore', 'pipe', 'pipe'] });
+      let said = '';
+      for (const stream of [child.stdout, child.stderr])
+        stream.setEncoding('utf8').on('data', (text) => (said += text));
+      const code = await new Promise((resolve, reject) => child.once('error', reject).once('close', resolve));
+      process.stdout.write(said);
+      return code;
+    }),
+  );
+  const failed = scripts.filter((_, index) => codes[index] !== 0);
+  if (failed.length > 0) {
+    console.error(`\nFailed: ${failed.join(', ')}.`);
+    process.exit(1);
   }
 }
 

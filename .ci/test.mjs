@@ -4,13 +4,12 @@ import { spawnSync } from 'node:child_process';
 import { existsSync, mkdtempSync, readFileSync, readdirSync, rmSync } from 'node:fs';
 import os from 'node:os';
 import path from 'node:path';
-import { build, install, requireNode, root, run } from './steps.mjs';
+import { build, install, requireNode, root, together } from './steps.mjs';
 
 requireNode();
 install();
 build();
-run('npm', ['run', 'lint']);
-run('npm', ['run', 'typecheck']);
+await together(['lint', 'typecheck']);
 
 const reports = mkdtempSync(path.join(os.tmpdir(), 'siltlight-tests-'));
 const runners = [

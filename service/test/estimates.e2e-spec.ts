@@ -1,6 +1,6 @@
 import { createHash } from 'node:crypto';
 import type { EstimateMethodId, EstimateRequest, EstimateResult } from '@siltlight/common/wire/estimates';
-import { ComputingThreads } from '../src/estimates/computing-threads.service';
+import { ComputingProcesses } from '../src/estimates/computing-processes.service';
 import { CODE_VERSION } from '../src/estimates/estimates.service';
 import {
   asBytes,
@@ -254,23 +254,23 @@ test('a job that is cancelled gives no result, and its estimate says so', async 
   expect((await detailOf(scientist, last.id)).state).toBe('cancelled');
 });
 
-test('the computing thread tells a refusal by name, ends on an abort, and goes on afterwards', async () => {
+test('the computing process tells a refusal by name, ends on an abort, and goes on afterwards', async () => {
   const detail = await estimated(scientist);
   const { inputs, result } = (await scientist.get(`${ESTIMATES}/${detail.id}/run-record`).expect(200)).body;
-  const threads = service.app.get(ComputingThreads, { strict: false });
+  const processes = service.app.get(ComputingProcesses, { strict: false });
   const never = new AbortController().signal;
-  await expect(threads.compute({ ...inputs, transmittance: 1.2 }, never)).rejects.toMatchObject({
+  await expect(processes.compute({ ...inputs, transmittance: 1.2 }, never)).rejects.toMatchObject({
     name: 'DomainError',
     field: 'transmittance',
     value: 1.2,
     allowed: [0, 1],
   });
   const abort = new AbortController();
-  const cut = threads.compute(inputs, abort.signal);
+  const cut = processes.compute(inputs, abort.signal);
   abort.abort(new Error('cut short'));
   await expect(cut).rejects.toThrow('cut short');
-  await expect(threads.compute(inputs, abort.signal)).rejects.toThrow('cut short');
-  const both = await Promise.all([threads.compute(inputs, never), threads.compute(inputs, never)]);
+  await expect(processes.compute(inputs, abort.signal)).rejects.toThrow('cut short');
+  const both = await Promise.all([processes.compute(inputs, never), processes.compute(inputs, never)]);
   for (const { global } of both) expect(global).toEqual(result.global);
 });
 

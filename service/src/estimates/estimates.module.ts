@@ -10,7 +10,7 @@ import { OpticsModule } from '../optics/optics.module';
 import { SlicesModule } from '../slices/slices.module';
 import { PeopleModule } from '../users/people.module';
 import { VersionsModule } from '../versions/versions.module';
-import { ComputingThreads } from './computing-threads.service';
+import { ComputingProcesses } from './computing-processes.service';
 import { EstimateContext } from './estimate-context.service';
 import { EstimateDependants } from './estimate-dependants.service';
 import { EstimateLists } from './estimate-lists.service';
@@ -39,7 +39,7 @@ import { Strata } from './strata.service';
   ],
   controllers: [StrataController, EstimatesController],
   providers: [
-    ComputingThreads,
+    ComputingProcesses,
     EstimateContext,
     EstimateDependants,
     EstimateLists,

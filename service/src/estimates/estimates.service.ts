@@ -10,7 +10,7 @@ import { WriteQueue } from '../database/write-queue';
 import { JobsService } from '../jobs/jobs.service';
 import { LedgerService } from '../ledger/ledger.service';
 import { VersionsService } from '../versions/versions.service';
-import { ComputingThreads } from './computing-threads.service';
+import { ComputingProcesses } from './computing-processes.service';
 import { ESTIMATE, type EstimateContent } from './estimate-content';
 import { labelResult } from './label-result';
 import { EstimateRunRow } from './models/estimate-run-row';
@@ -27,7 +27,7 @@ export class EstimatesService implements OnModuleInit {
   constructor(
     @InjectModel(EstimateRunRow) private readonly runs: typeof EstimateRunRow,
     private readonly inputs: ResolveInputs,
-    private readonly threads: ComputingThreads,
+    private readonly processes: ComputingProcesses,
     private readonly versions: VersionsService,
     private readonly jobs: JobsService,
     private readonly ledger: LedgerService,
@@ -114,7 +114,7 @@ export class EstimatesService implements OnModuleInit {
     await report(0.05, 'reading the pinned versions');
     const { inputs, pins, title, invented } = await this.inputs.resolve(run.request);
     await report(0.2, `computing ${inputs.ensemble.members} members`);
-    const result = labelResult(await this.threads.compute(inputs, signal));
+    const result = labelResult(await this.processes.compute(inputs, signal));
     await report(0.9, 'keeping the result');
     const content: EstimateContent = {
       title,

@@ -1,10 +1,9 @@
-import { parentPort } from 'node:worker_threads';
 import type { EstimateInputs } from '@siltlight/common/estimate/estimate-inputs';
 import type { EstimateResult } from '@siltlight/common/estimate/estimate-result';
 import { runEstimate } from '@siltlight/common/estimate/run-estimate';
 import { DomainError, type DomainErrorDetails } from '@siltlight/common/physical/domain-error';
 
-/** Errors lose their class on the way between threads; a refusal goes as data, so that it stays one. */
+/** Errors lose their class on the way between processes; a refusal goes as data, so that it stays one. */
 export type ComputingAnswer =
   { result: EstimateResult } | { refused: { code: string; details: DomainErrorDetails; message: string } };
 
@@ -19,5 +18,6 @@ function answerTo(inputs: EstimateInputs): ComputingAnswer {
   }
 }
 
-/** Estimates one after the other on a thread of its own, so that the server answers meanwhile. */
-parentPort!.on('message', (inputs: EstimateInputs) => parentPort!.postMessage(answerTo(inputs)));
+/** Estimates one after the other in a process of its own, so that the server answers meanwhile; it ends with the server. */
+process.on('message', (inputs: EstimateInputs) => process.send!(answerTo(inputs)));
+process.on('disconnect', () => process.exit(0));

@@ -13,12 +13,21 @@ export const axeFaults = (page: Page): Promise<string[]> =>
 /** The same page under the other theme differs in its colours alone. */
 export async function axeFaultsInDark(page: Page): Promise<string[]> {
   await page.emulateMedia({ colorScheme: 'dark' });
+  await page.evaluate(coloursSettled);
   const faults = await faultsOf(
     page,
     new AxeBuilder({ page }).withRules(['color-contrast', 'link-in-text-block']),
   );
   await page.emulateMedia({ colorScheme: 'light' });
+  await page.evaluate(coloursSettled);
   return faults;
+}
+
+/** In the page: colours fade from one theme to the other, and half-way they are no one's. */
+async function coloursSettled(): Promise<void> {
+  for (let frame = 0; frame < 3; frame += 1) await new Promise(requestAnimationFrame);
+  const fading = document.getAnimations().filter((animation) => animation instanceof CSSTransition);
+  await Promise.allSettled(fading.map((animation) => animation.finished));
 }
 
 async function faultsOf(page: Page, axe: AxeBuilder): Promise<string[]> {

@@ -31,7 +31,7 @@ export function useMappingDraft(detail: SubmissionDetail, { change }: Changing) 
     apply: async () => {
       const counts = detail.counts;
       if (!(await change(setMapping(mapping)))) return;
-      setDraft(null);
+      setDraft((now) => (now === draft ? null : now)); // what was typed meanwhile stays
       setBefore(counts);
     },
   };

@@ -81,7 +81,7 @@ function answerOf(
       over.signal.addEventListener('abort', () => child.off(event, then));
     };
     listen('message', (found) => resolve(found as ComputingAnswer));
-    listen('error', (error) => reject(error as Error));
+    listen('error', (cause) => reject(new Error('The computing process failed.', { cause })));
     listen('exit', (code, by) =>
       reject(new Error(`The computing process ended with ${String(code ?? by)}.`)),
     );

@@ -7,7 +7,7 @@ export default defineConfig({
     environment: 'node',
     globalSetup: ['e2e/seed.ts'],
     fileParallelism: false,
-    testTimeout: 240_000, // one page after another, on machines that do other work as well,
-    hookTimeout: 180_000,
+    testTimeout: 600_000, // one page after another, on machines that do other work as well
+    hookTimeout: 300_000,
   },
 });

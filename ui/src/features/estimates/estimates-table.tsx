@@ -21,7 +21,7 @@ const columns: DataColumn<EstimateSummary>[] = [
       </Link>
     ),
   },
-  { id: 'run', header: 'Run', value: (row) => row.runNumber, align: 'right' },
+  { id: 'run', header: 'Run', value: (row) => row.runNumber, align: 'right', wideOnly: true },
   { id: 'title', header: 'Title', value: (row) => row.title, wideOnly: true },
   { id: 'method', header: 'Method', value: (row) => methodName(row.method), wideOnly: true },
   {
